@@ -1,0 +1,25 @@
+import errors from '@shared/locales/en/errors.json'
+import { createInstance } from 'i18next'
+
+const i18n = createInstance()
+i18n.init({
+  lng: 'en',
+  fallbackLng: 'en',
+  defaultNS: 'errors',
+  nsSeparator: false,
+  initAsync: false,
+  // Sentences go out as JSON, and the browser's own rendering escapes them.
+  interpolation: { escapeValue: false },
+  resources: { en: { errors } },
+})
+
+export type SentenceParams = Readonly<Record<string, string | number>>
+
+/** The sentence for a key of `shared/locales/…/errors.json`. */
+export function sentence(key: string, params: SentenceParams = {}): string {
+  return i18n.t(key, params)
+}
+
+export function hasSentence(key: string): boolean {
+  return i18n.exists(key)
+}

@@ -1,0 +1,87 @@
+import type { CrossValidation } from './cross-validation'
+import { designMatrix } from './design-matrix'
+import type { MeasuredPlaces } from './measured-area'
+import { createMinimumZoneSolver } from './minimum-zone'
+import { drawCoefficients } from './posterior-draws'
+import type { SurfaceFit } from './surface-fit'
+
+/** Draws of the whole surface; the spread of so many is known to about a tenth. */
+const DRAWS = 48
+/** Rim places used for draws: the spread needs fewer than the figure itself. */
+const DRAW_PLACES = 2600
+/**
+ * Share of what left-out bands miss that is counted for places between bands that were read: a left-out band
+ * lies a whole spacing from its neighbours, a place between bands half of one at most. Chosen on seeded
+ * drawings of every kind of face so that U covers.
+ */
+const SHARE_OF_CROSS_VALIDATION = 0.25
+/** No surface model is better than this, bands: structure finer than it and the rim's pixel steps. */
+const MODEL_FLOOR_BANDS = 0.0025
+
+/** Contributions to the minimum zone from the clicks and the surface between them, bands. */
+export interface SurfaceUncertainty {
+  /** Spread of the minimum zone when the surface varies as the clicks' noise lets it. */
+  readonly centreLine: number
+  /** What the surface may hide between the bands. */
+  readonly betweenBands: number
+  /** By how much noise widens a peak-to-valley on average (a minimum zone of a noisy surface is too large). */
+  readonly bias: number
+}
+
+/**
+ * Propagates the fit's posterior through the minimum zone itself, which isn't linear, by seeded draws
+ * (JCGM 101), and adds what cross-validation says of the surface between the bands.
+ *
+ * @param minimumZoneBands the figure from the fitted surface
+ */
+export function surfaceUncertainty(
+  fit: SurfaceFit,
+  places: MeasuredPlaces,
+  crossValidation: CrossValidation,
+  minimumZoneBands: number,
+): SurfaceUncertainty {
+  const stride = Math.max(1, places.count / DRAW_PLACES)
+  const picked: number[] = []
+  for (let k = 0; k < places.count; k += stride) picked.push(Math.floor(k))
+  const xMm = Float64Array.from(picked, (i) => places.xMm[i]!)
+  const yMm = Float64Array.from(picked, (i) => places.yMm[i]!)
+  const terms = fit.active.length
+  const design = designMatrix(fit.basis, fit.active, picked.length, xMm, yMm)
+  const draws = drawCoefficients(fit, DRAWS)
+  const solver = createMinimumZoneSolver(xMm, yMm)
+  const gaps = new Float64Array(picked.length)
+  const central = minimumZoneOf(solver, design, fit.coefficients, terms, gaps)
+  let sum = 0
+  let sumOfSquares = 0
+  const coefficients = new Float64Array(terms)
+  for (let d = 0; d < DRAWS; d++) {
+    for (let a = 0; a < terms; a++) coefficients[a] = fit.coefficients[a]! + draws[d * terms + a]!
+    const deviation = minimumZoneOf(solver, design, coefficients, terms, gaps) - central
+    sum += deviation
+    sumOfSquares += deviation * deviation
+  }
+  const mean = sum / DRAWS
+  const spread = Math.sqrt(Math.max(0, sumOfSquares - DRAWS * mean * mean) / (DRAWS - 1))
+  const missed = SHARE_OF_CROSS_VALIDATION * Math.min(crossValidation.typicalExcess, minimumZoneBands)
+  return {
+    centreLine: spread,
+    betweenBands: Math.hypot(missed, MODEL_FLOOR_BANDS),
+    bias: mean,
+  }
+}
+
+function minimumZoneOf(
+  solver: ReturnType<typeof createMinimumZoneSolver>,
+  design: Float64Array,
+  coefficients: Float64Array,
+  terms: number,
+  gaps: Float64Array,
+): number {
+  for (let i = 0; i < gaps.length; i++) {
+    let sum = 0
+    const row = i * terms
+    for (let a = 0; a < terms; a++) sum += design[row + a]! * coefficients[a]!
+    gaps[i] = sum
+  }
+  return solver.solve(gaps).width
+}

@@ -1,0 +1,369 @@
+import { choleskyInPlace, invertLower, solveLower, solveLowerTransposed } from './cholesky'
+import { accumulateNormalEquations, designMatrix, pickColumns, rowDot } from './design-matrix'
+import type { SurfaceBasis } from './surface-basis'
+
+/**
+ * Clicks on dark bands as the fit wants them. `order` is the gap in whole bands; the fit is of the gap, in
+ * bands, so that a click's own error is (px off the band) × (slope of the gap, bands per px).
+ */
+export interface TracedPoints {
+  readonly count: number
+  readonly xMm: Float64Array
+  readonly yMm: Float64Array
+  /** The same places one pixel on along the photograph's x, and along its y: for the slope per pixel. */
+  readonly xMmRight: Float64Array
+  readonly yMmRight: Float64Array
+  readonly xMmDown: Float64Array
+  readonly yMmDown: Float64Array
+  readonly order: Float64Array
+  readonly traceOf: Int32Array
+}
+
+export interface SurfaceFit {
+  readonly basis: SurfaceBasis
+  /** The functions that the data left in play; the others count as zero. */
+  readonly active: Int32Array
+  /** Gap in bands = Σ coefficients × active functions. */
+  readonly coefficients: Float64Array
+  /** Lower Cholesky factor of the posterior precision (bands⁻²) of the active functions, row-major. */
+  readonly precisionFactor: Float64Array
+  /** Standard deviation of a click square to its band. */
+  readonly clickNoisePx: number
+  readonly effectiveTerms: number
+  /** Signed distance of each click from the fitted band, px, and its robust weight 0 to 1. */
+  readonly residualsPx: Float64Array
+  readonly weights: Float64Array
+  /** Slope of the gap at each click, bands per px, floored where the gap is level. */
+  readonly slopePerPx: Float64Array
+  /** Active functions at the clicks, row by row. */
+  readonly design: Float64Array
+  readonly iterations: number
+  readonly converged: boolean
+  /** Estimated deviation of each variance component, bands. */
+  readonly componentSd: Float64Array
+  /** For each active function, how far the data determine it, 0 to 1. */
+  readonly determined: Float64Array
+}
+
+/** Clicks beyond this many standard deviations lose weight (Huber 1964; 1.345 is 95 % efficient, wider spares good ones). */
+const HUBER_LIMIT = 2.5
+/** A click beyond this many lies on another band or is a slip: it gets none. */
+const SET_ASIDE_LIMIT = 5
+const REWEIGHTINGS = 8
+const EVIDENCE_STEPS = 12
+/** The evidence has settled when no component that matters changes its deviation by more than this share. */
+const SETTLED_SHARE = 0.02
+/** Prior deviation that every shrunk component starts from, bands: a loose start invents form where there are no bands. */
+const STARTING_SD_BANDS = 0.02
+/** The free functions are as good as unbounded, bands. */
+const FREE_SD_BANDS = 1e3
+const LEAST_SD_BANDS = 1e-6
+/** A function whose prior lets it explain less than this share of what the data can see is left out. */
+const NEGLIGIBLE_INFORMATION = 1e-3
+/** Clicks that suffice to choose the functions. */
+const ENOUGH_TO_CHOOSE = 700
+
+/**
+ * Fits the gap through the clicks: least squares weighted by each click's own error, Huber weights against
+ * slips, and a prior variance for every function that is a sum of few components, re-estimated from the data
+ * by evidence (MacKay, Neural Computation 4, 415 (1992)), so that the clicks themselves choose the smoothness.
+ *
+ * @throws RangeError when the clicks don't determine even the free functions.
+ */
+export function fitSurface(points: TracedPoints, basis: SurfaceBasis): SurfaceFit {
+  const everything = Int32Array.from({ length: basis.size }, (_, i) => i)
+  const scales = new Float64Array(basis.components.length).fill(STARTING_SD_BANDS ** 2)
+  if (points.count <= ENOUGH_TO_CHOOSE) return refine(new Fitting(points, basis, everything, scales))
+  // Few clicks choose the functions as well as many; only those chosen are then fitted to all clicks.
+  const chosen = refine(new Fitting(thinned(points, ENOUGH_TO_CHOOSE), basis, everything, scales))
+  const start = chosen.componentSd.map((sd) => sd * sd)
+  return refine(new Fitting(points, basis, chosen.active, start))
+}
+
+/** The fitted gap at a place of the part frame, bands. */
+export function gapAt(fit: SurfaceFit, xMm: number, yMm: number): number {
+  const functions = new Float64Array(fit.basis.size)
+  fit.basis.evaluate(xMm, yMm, functions, 0)
+  let gap = 0
+  for (let a = 0; a < fit.active.length; a++) gap += fit.coefficients[a]! * functions[fit.active[a]!]!
+  return gap
+}
+
+/** Every so-manieth click, `count` in all. */
+function thinned(points: TracedPoints, count: number): TracedPoints {
+  const pick = Int32Array.from({ length: count }, (_, i) => Math.floor((i * points.count) / count))
+  const of = (values: Float64Array) => Float64Array.from(pick, (i) => values[i]!)
+  return {
+    count,
+    xMm: of(points.xMm),
+    yMm: of(points.yMm),
+    xMmRight: of(points.xMmRight),
+    yMmRight: of(points.yMmRight),
+    xMmDown: of(points.xMmDown),
+    yMmDown: of(points.yMmDown),
+    order: of(points.order),
+    traceOf: Int32Array.from(pick, (i) => points.traceOf[i]!),
+  }
+}
+
+function refine(fit: Fitting): SurfaceFit {
+  let iterations = 0
+  let converged = false
+  while (iterations < REWEIGHTINGS && !converged) {
+    const before = fit.noise
+    const settled = fit.settleEvidence(iterations === 0 ? 3 : EVIDENCE_STEPS)
+    fit.reweigh()
+    iterations++
+    converged = settled && iterations >= 3 && Math.abs(fit.noise - before) < 0.005 * fit.noise
+    if (!converged) fit.leaveOutNegligible()
+  }
+  fit.settleEvidence(1)
+  fit.reweigh()
+  return fit.result(iterations, converged)
+}
+
+/** The state of one fit; every array is allocated once and shrinks only when functions are left out. */
+class Fitting {
+  noise = 0.1
+  private readonly count: number
+  private active: Int32Array
+  private design: Float64Array
+  private right: Float64Array
+  private down: Float64Array
+  private gram: Float64Array
+  private moment: Float64Array
+  private precision: Float64Array
+  private inverse: Float64Array
+  private coefficients: Float64Array
+  private priorVariance: Float64Array
+  private readonly scales: Float64Array
+  private readonly weights: Float64Array
+  private readonly rowWeight: Float64Array
+  private readonly slope: Float64Array
+  private readonly residualsPx: Float64Array
+  private effectiveTerms = 0
+  private determined = new Float64Array(0)
+
+  constructor(
+    private readonly points: TracedPoints,
+    private readonly basis: SurfaceBasis,
+    active: Int32Array,
+    scales: Float64Array,
+  ) {
+    const { count } = points
+    this.count = count
+    this.active = active
+    this.scales = scales
+    this.design = designMatrix(basis, active, count, points.xMm, points.yMm)
+    this.right = designMatrix(basis, active, count, points.xMmRight, points.yMmRight)
+    this.down = designMatrix(basis, active, count, points.xMmDown, points.yMmDown)
+    // The first pass knows no slopes: every click weighs the same, with an error of a tenth of a band.
+    this.weights = new Float64Array(count).fill(1)
+    this.rowWeight = new Float64Array(count).fill(1)
+    this.slope = new Float64Array(count).fill(1)
+    this.residualsPx = new Float64Array(count)
+    const terms = active.length
+    this.gram = new Float64Array(terms * terms)
+    this.precision = new Float64Array(terms * terms)
+    this.inverse = new Float64Array(terms * terms)
+    this.moment = new Float64Array(terms)
+    this.coefficients = new Float64Array(terms)
+    this.priorVariance = new Float64Array(terms)
+  }
+
+  /** Re-estimates the components' variances with the weights as they are; true when they have settled. */
+  settleEvidence(steps: number): boolean {
+    const terms = this.active.length
+    accumulateNormalEquations(
+      this.design,
+      this.points.order,
+      this.rowWeight,
+      this.count,
+      terms,
+      this.gram,
+      this.moment,
+    )
+    let settled = false
+    for (let step = 0; step < steps && !settled; step++) {
+      this.mixVariances()
+      this.solvePosterior()
+      invertLower(this.precision, terms, this.inverse)
+      settled = this.updateScales() < SETTLED_SHARE
+      this.noise = this.weightedNoise()
+    }
+    this.mixVariances()
+    this.solvePosterior()
+    return settled
+  }
+
+  private mixVariances(): void {
+    const { basis, active, priorVariance, scales } = this
+    const terms = active.length
+    for (let a = 0; a < terms; a++) {
+      const f = active[a]!
+      if (f < basis.freeCount) {
+        priorVariance[a] = FREE_SD_BANDS * FREE_SD_BANDS
+        continue
+      }
+      let variance = LEAST_SD_BANDS * LEAST_SD_BANDS
+      for (let k = 0; k < scales.length; k++) variance += scales[k]! * basis.components[k]!.profile[f]!
+      priorVariance[a] = variance
+    }
+  }
+
+  private solvePosterior(): void {
+    const { gram, moment, precision, coefficients, priorVariance } = this
+    const terms = this.active.length
+    const scale = 1 / (this.noise * this.noise)
+    for (let a = 0; a < terms; a++) {
+      const row = a * terms
+      for (let b = 0; b <= a; b++) precision[row + b] = gram[row + b]! * scale
+      precision[row + a] = precision[row + a]! + 1 / priorVariance[a]!
+      coefficients[a] = moment[a]! * scale
+    }
+    if (!choleskyInPlace(precision, terms)) throw new RangeError('the clicks do not determine a surface')
+    solveLower(precision, terms, coefficients)
+    solveLowerTransposed(precision, terms, coefficients)
+  }
+
+  /**
+   * Fixed-point step of the components' variances towards greatest evidence: where the evidence is
+   * stationary, Σ profile·(c/v)² equals Σ profile·(v − Σjj)/v². Returns the largest relative change of a
+   * component that matters.
+   */
+  private updateScales(): number {
+    const { basis, active, inverse, priorVariance, coefficients, scales } = this
+    const terms = active.length
+    // Σ = L⁻ᵀ·L⁻¹, so its diagonal is the sum of squares down each column of L⁻¹.
+    const posteriorVariance = new Float64Array(terms)
+    for (let i = 0; i < terms; i++) {
+      const row = i * terms
+      for (let j = 0; j <= i; j++) {
+        const value = inverse[row + j]!
+        posteriorVariance[j] = posteriorVariance[j]! + value * value
+      }
+    }
+    this.determined = posteriorVariance.map((variance, a) => Math.max(0, 1 - variance / priorVariance[a]!))
+    this.effectiveTerms = this.determined.reduce((a, b) => a + b, 0)
+    let largestChange = 0
+    basis.components.forEach(({ profile }, k) => {
+      let energy = 0
+      let room = 0
+      let determined = 0
+      for (let a = 0; a < terms; a++) {
+        const share = profile[active[a]!]!
+        if (share === 0) continue
+        const v = priorVariance[a]!
+        const ratio = coefficients[a]! / v
+        energy += share * ratio * ratio
+        room += (share * Math.max(0, v - posteriorVariance[a]!)) / (v * v)
+        determined += (scales[k]! * share * Math.max(0, v - posteriorVariance[a]!)) / (v * v)
+      }
+      const step = room > 0 ? energy / room : 1
+      const bounded = Math.min(16, Math.max(1 / 16, step))
+      scales[k] = Math.max(1e-12, scales[k]! * bounded)
+      if (determined > 0.05) largestChange = Math.max(largestChange, Math.abs(Math.sqrt(bounded) - 1))
+    })
+    return largestChange
+  }
+
+  private weightedNoise(): number {
+    let sum = 0
+    let used = 0
+    for (let i = 0; i < this.count; i++) {
+      const w = this.rowWeight[i]!
+      if (w === 0) continue
+      const r = this.points.order[i]! - rowDot(this.design, this.coefficients, this.active.length, i)
+      sum += w * r * r
+      used++
+    }
+    return Math.max(1e-6, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+  }
+
+  /** Residuals in px, robust weights, row weights and click noise from the surface as it stands. */
+  reweigh(): void {
+    this.measureSlopes()
+    const { count, residualsPx, weights, rowWeight, slope } = this
+    const terms = this.active.length
+    for (let i = 0; i < count; i++) {
+      residualsPx[i] = (this.points.order[i]! - rowDot(this.design, this.coefficients, terms, i)) / slope[i]!
+    }
+    const freedom = Math.max(1, count - this.effectiveTerms)
+    const scale = robustScale(residualsPx) * Math.sqrt(count / freedom)
+    let sum = 0
+    let used = 0
+    for (let i = 0; i < count; i++) {
+      const z = Math.abs(residualsPx[i]!) / scale
+      weights[i] = z <= HUBER_LIMIT ? 1 : z <= SET_ASIDE_LIMIT ? HUBER_LIMIT / z : 0
+      rowWeight[i] = weights[i]! / (slope[i]! * slope[i]!)
+      if (weights[i]! === 0) continue
+      sum += weights[i]! * residualsPx[i]! * residualsPx[i]!
+      used++
+    }
+    this.noise = Math.max(1e-4, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+  }
+
+  private measureSlopes(): void {
+    const { count, slope, coefficients } = this
+    const terms = this.active.length
+    let sumOfSquares = 0
+    for (let i = 0; i < count; i++) {
+      const here = rowDot(this.design, coefficients, terms, i)
+      const dx = rowDot(this.right, coefficients, terms, i) - here
+      const dy = rowDot(this.down, coefficients, terms, i) - here
+      slope[i] = Math.hypot(dx, dy)
+      sumOfSquares += slope[i]! * slope[i]!
+    }
+    // Where the gap is level (the middle of a saddle or of rings) the click's error acts through the
+    // curvature instead: a floor keeps such a click from outweighing all others.
+    const floor = 0.15 * Math.sqrt(sumOfSquares / Math.max(1, count))
+    for (let i = 0; i < count; i++) slope[i] = Math.max(slope[i]!, floor)
+  }
+
+  /** Drops functions that the prior has shrunk to nothing, so that later steps are quicker. */
+  leaveOutNegligible(): void {
+    const terms = this.active.length
+    const scale = 1 / (this.noise * this.noise)
+    const kept: number[] = []
+    for (let a = 0; a < terms; a++) {
+      const free = this.active[a]! < this.basis.freeCount
+      let information = 0
+      for (let i = 0; i < this.count; i++) {
+        const f = this.design[i * terms + a]!
+        information += this.rowWeight[i]! * f * f
+      }
+      if (free || this.priorVariance[a]! * information * scale > NEGLIGIBLE_INFORMATION) kept.push(a)
+    }
+    if (kept.length === terms) return
+    this.design = pickColumns(this.design, this.count, terms, kept)
+    this.right = pickColumns(this.right, this.count, terms, kept)
+    this.down = pickColumns(this.down, this.count, terms, kept)
+    this.active = Int32Array.from(kept, (a) => this.active[a]!)
+  }
+
+  result(iterations: number, converged: boolean): SurfaceFit {
+    const terms = this.active.length
+    return {
+      basis: this.basis,
+      active: this.active,
+      coefficients: this.coefficients.slice(0, terms),
+      precisionFactor: this.precision.slice(0, terms * terms),
+      clickNoisePx: this.noise,
+      effectiveTerms: this.effectiveTerms,
+      residualsPx: this.residualsPx,
+      weights: this.weights,
+      slopePerPx: this.slope,
+      design: this.design,
+      iterations,
+      converged,
+      componentSd: this.scales.map(Math.sqrt),
+      determined: this.determined,
+    }
+  }
+}
+
+/** Median of |residual| made equal to the standard deviation of a normal distribution; never under 0.05 px. */
+function robustScale(residualsPx: Float64Array): number {
+  const sorted = residualsPx.map(Math.abs).sort()
+  return Math.max(0.05, 1.4826 * (sorted[sorted.length >> 1] ?? 0))
+}
