@@ -66,7 +66,8 @@ export function rigidMap(angleRad: number, tx: number, ty: number): Homography {
  * Multiple View Geometry, 4.1), or null when three of either lie on a line.
  */
 export function homographyFromFourPoints(from: readonly Place[], to: readonly Place[]): Homography | null {
-  if (from.length !== 4 || to.length !== 4) throw new RangeError('homographyFromFourPoints takes four places each')
+  if (from.length !== 4 || to.length !== 4)
+    throw new RangeError('homographyFromFourPoints takes four places each')
   if (hasThreeOnALine(from) || hasThreeOnALine(to)) return null
   const rows: number[][] = []
   for (let k = 0; k < 4; k++) {

@@ -47,7 +47,9 @@ export interface OutlineProblem {
 export function partFrame(outline: Outline, size: DrawnSize, view: View): PartFrame | OutlineProblem {
   const pxToMm = photoToPart(outline, size, view)
   if ('problem' in pxToMm) return pxToMm
-  const turned = view.mirrored ? composeHomographies(Float64Array.of(-1, 0, 0, 0, 1, 0, 0, 0, 1), pxToMm) : pxToMm
+  const turned = view.mirrored
+    ? composeHomographies(Float64Array.of(-1, 0, 0, 0, 1, 0, 0, 0, 1), pxToMm)
+    : pxToMm
   const mmToPx = invertHomography(turned)
   if (!mmToPx) return { problem: 'flat' }
   return {

@@ -23,14 +23,16 @@ export function leaveOutBands(points: TracedPoints, fit: SurfaceFit): CrossValid
   }
   const excessByOrder = new Map<number, number>()
   for (const [order, rows] of byOrder) {
-    const excess = leaveOut(rows, fit)
-    if (excess !== null) excessByOrder.set(order, excess)
+    const errors = foretellingErrors(rows, fit)
+    if (!errors) continue
+    excessByOrder.set(order, excessOverNoise(rows, errors, fit))
   }
   const sorted = [...excessByOrder.values()].sort((a, b) => a - b)
   return { excessByOrder, typicalExcess: sorted[sorted.length >> 1] ?? 0 }
 }
 
-function leaveOut(rows: readonly number[], fit: SurfaceFit): number | null {
+/** Order less what the rest foretells, bands, for each click left out; null when the rest foretells nothing. */
+function foretellingErrors(rows: readonly number[], fit: SurfaceFit): Float64Array | null {
   const n = rows.length
   const terms = fit.active.length
   const sigma = fit.clickNoisePx
@@ -56,12 +58,16 @@ function leaveOut(rows: readonly number[], fit: SurfaceFit): number | null {
   if (!choleskyInPlace(system, n)) return null
   solveLower(system, n, error)
   solveLowerTransposed(system, n, error)
-  let sum = 0
-  let noise = 0
-  rows.forEach((i, k) => {
-    const slope = fit.slopePerPx[i]!
-    sum += (error[k]! * sigma * slope) ** 2 / Math.max(1e-6, fit.weights[i]!)
-    noise += (sigma * slope) ** 2
+  return error.map((e, k) => {
+    const i = rows[k]!
+    return (e * sigma * fit.slopePerPx[i]!) / Math.sqrt(Math.max(1e-6, fit.weights[i]!))
   })
-  return Math.sqrt(Math.max(0, sum - noise) / n)
+}
+
+function excessOverNoise(rows: readonly number[], errors: Float64Array, fit: SurfaceFit): number {
+  let sum = 0
+  rows.forEach((i, k) => {
+    sum += errors[k]! ** 2 - (fit.clickNoisePx * fit.slopePerPx[i]!) ** 2
+  })
+  return Math.sqrt(Math.max(0, sum) / rows.length)
 }

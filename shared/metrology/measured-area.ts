@@ -175,12 +175,17 @@ export function measuredPlaces(area: MeasuredArea): MeasuredPlaces {
   const xs: number[] = []
   const ys: number[] = []
   const step = Math.max(1, Math.round(Math.sqrt(pixelCount(pixels) / INTERIOR_PLACES)))
+  // Anchored to the area itself, so that a face shifted in the photograph is sampled alike.
   const half = step >> 1
+  const left = pixels.rows.reduce(
+    (least, spans) => Math.min(least, spans[0] ?? least),
+    Number.POSITIVE_INFINITY,
+  )
   pixels.rows.forEach((spans, i) => {
     const y = pixels.firstRow + i
-    if (y % step !== half % step) return
+    if (i % step !== half) return
     for (let k = 0; k < spans.length; k += 2) {
-      const first = spans[k]! + ((((half - spans[k]!) % step) + step) % step)
+      const first = spans[k]! + ((((left + half - spans[k]!) % step) + step) % step)
       for (let x = first; x <= spans[k + 1]!; x += step) {
         xs.push(x)
         ys.push(y)

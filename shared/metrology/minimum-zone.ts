@@ -38,13 +38,13 @@ export function createMinimumZoneSolver(xs: ArrayLike<number>, ys: ArrayLike<num
   const count = xs.length
   if (ys.length !== count) throw new RangeError('minimum zone: xs and ys differ in length')
   if (count < 3) throw new RangeError('minimum zone: at least three places are needed')
-  const { u, v, cx, cy, extent } = scaledPlaces(xs, ys)
+  const { exactU, exactV, u, v, cx, cy, extent } = scaledPlaces(xs, ys)
   const spread = spreadReference(u, v)
 
   return {
     solve(zs, start) {
       if (zs.length !== count) throw new RangeError('minimum zone: as many heights as places are needed')
-      if (count === 3) return throughThree(u, v, zs, cx, cy, extent)
+      if (count === 3) return throughThree(exactU, exactV, zs, cx, cy, extent)
       let reference = (start && start.length === 4 && level(start, u, v, zs)) || level(spread, u, v, zs)
       if (!reference) throw new RangeError('minimum zone: the places lie on one line')
       let iterations = 0
@@ -56,7 +56,10 @@ export function createMinimumZoneSolver(xs: ArrayLike<number>, ys: ArrayLike<num
         worst = worstOf(reference, u, v, zs)
         iterations++
       }
-      return finish(reference, iterations, u, v, zs, cx, cy, extent)
+      // The contacts are known; their plane over the true places is the exact one, unless three of them are in line.
+      const exact = level(reference.places, exactU, exactV, zs)
+      const best = exact && exact.departure > reference.departure * (1 - 1e-6) ? exact : reference
+      return finish(best, iterations, exactU, exactV, zs, cx, cy, extent)
     },
   }
 }
@@ -81,14 +84,12 @@ function scaledPlaces(xs: ArrayLike<number>, ys: ArrayLike<number>) {
   const cx = (left + right) / 2
   const cy = (top + bottom) / 2
   const extent = Math.max(right - left, bottom - top) / 2 || 1
-  const u = new Float64Array(xs.length)
-  const v = new Float64Array(xs.length)
+  const exactU = Float64Array.from(xs, (x) => (x - cx) / extent)
+  const exactV = Float64Array.from(ys, (y) => (y - cy) / extent)
   // A fixed sequence without pattern (multiples of irrational numbers, wrapped).
-  for (let i = 0; i < xs.length; i++) {
-    u[i] = (xs[i]! - cx) / extent + JITTER * (((i + 1) * 0.6180339887498949) % 1)
-    v[i] = (ys[i]! - cy) / extent + JITTER * (((i + 1) * 0.7548776662466927) % 1)
-  }
-  return { u, v, cx, cy, extent }
+  const u = exactU.map((value, i) => value + JITTER * (((i + 1) * 0.6180339887498949) % 1))
+  const v = exactV.map((value, i) => value + JITTER * (((i + 1) * 0.7548776662466927) % 1))
+  return { exactU, exactV, u, v, cx, cy, extent }
 }
 
 /** Four places well apart: two that are far from one another, one far from their line, and one beyond it. */

@@ -45,7 +45,8 @@ export function flatnessParameters(
     area += weights[i]!
   }
   const flatness = {
-    minimumZoneUm: minimumZone(xMm, yMm, heightUm).width,
+    // The least squares plane's own pair is one of the pairs that the minimum zone chooses from.
+    minimumZoneUm: Math.min(peak - valley, minimumZone(xMm, yMm, heightUm).width),
     leastSquaresUm: peak - valley,
     peakUm: peak,
     valleyUm: -valley,

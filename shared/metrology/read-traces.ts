@@ -14,11 +14,12 @@ import {
   measuredArea,
   measuredPlaces,
 } from './measured-area'
+import { misnumberedTrace } from './misnumbered-band'
 import { flatnessParameters } from './parameters'
 import { readPressArrow } from './press-arrow'
 import { rimDistancesMm, steepestRimSlope } from './rim'
 import { supportedPlaces } from './support'
-import { fitSurface, type SurfaceFit, type TracedPoints } from './surface-fit'
+import { fitSurface, gapAt, type SurfaceFit, type TracedPoints } from './surface-fit'
 import { clicksOutside, clicksThatDoNotFit, crossedBands, finding, missingForAFigure } from './trace-checks'
 import type {
   FacePlace,
@@ -146,6 +147,13 @@ function figureFrom(
     const place = [reading.pressArrow!.x, reading.pressArrow!.y] as const
     return refused([finding('orderAgainstPressArrow', 'refusal', {}, { place })])
   }
+  const wrong = misnumberedTrace(
+    points,
+    fit,
+    (others) => tryFit(others, reading, frame),
+    (other, i) => gapAt(other, points.xMm[i]!, points.yMm[i]!),
+  )
+  if (wrong !== null) return refused([misnumbered(reading, wrong)])
   const misfits = clicksThatDoNotFit(reading, points, fit)
   const refusals = misfits.filter((f) => f.severity === 'refusal')
   if (refusals.length > 0) return refused(refusals)
@@ -249,6 +257,12 @@ function figureFrom(
     ],
   }
   return { kind: 'figure', result }
+}
+
+function misnumbered(reading: TracedReading, index: number): Finding {
+  const trace = reading.traces[index]!
+  const place = trace.points[trace.points.length >> 1]!
+  return finding('neighboursDiffer', 'refusal', { order: trace.order ?? '' }, { place, traceIds: [trace.id] })
 }
 
 /** Heights of the fitted surface, high up: the gap turned over. */

@@ -49,6 +49,8 @@ export interface SurfaceFit {
 const HUBER_LIMIT = 2.5
 /** A click beyond this many lies on another band or is a slip: it gets none. */
 const SET_ASIDE_LIMIT = 5
+/** No hand and no program finds a band's centre better than this; it keeps exact clicks from asking for every function. */
+const LEAST_CLICK_NOISE_PX = 0.05
 const REWEIGHTINGS = 8
 const EVIDENCE_STEPS = 12
 /** The evidence has settled when no component that matters changes its deviation by more than this share. */
@@ -118,13 +120,15 @@ function refine(fit: Fitting): SurfaceFit {
     if (!converged) fit.leaveOutNegligible()
   }
   fit.settleEvidence(1)
-  fit.reweigh()
+  fit.measureResiduals()
   return fit.result(iterations, converged)
 }
 
 /** The state of one fit; every array is allocated once and shrinks only when functions are left out. */
 class Fitting {
   noise = 0.1
+  /** Once the weights are in px, noise is too. */
+  private leastNoise = 1e-6
   private readonly count: number
   private active: Int32Array
   private design: Float64Array
@@ -189,7 +193,7 @@ class Fitting {
       this.solvePosterior()
       invertLower(this.precision, terms, this.inverse)
       settled = this.updateScales() < SETTLED_SHARE
-      this.noise = this.weightedNoise()
+      this.noise = Math.max(this.leastNoise, this.weightedNoise())
     }
     this.mixVariances()
     this.solvePosterior()
@@ -283,11 +287,9 @@ class Fitting {
   /** Residuals in px, robust weights, row weights and click noise from the surface as it stands. */
   reweigh(): void {
     this.measureSlopes()
+    this.leastNoise = LEAST_CLICK_NOISE_PX
+    this.measureResiduals()
     const { count, residualsPx, weights, rowWeight, slope } = this
-    const terms = this.active.length
-    for (let i = 0; i < count; i++) {
-      residualsPx[i] = (this.points.order[i]! - rowDot(this.design, this.coefficients, terms, i)) / slope[i]!
-    }
     const freedom = Math.max(1, count - this.effectiveTerms)
     const scale = robustScale(residualsPx) * Math.sqrt(count / freedom)
     let sum = 0
@@ -300,7 +302,16 @@ class Fitting {
       sum += weights[i]! * residualsPx[i]! * residualsPx[i]!
       used++
     }
-    this.noise = Math.max(1e-4, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+    this.noise = Math.max(LEAST_CLICK_NOISE_PX, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+  }
+
+  /** Distances of the clicks from the fitted bands, px, by the slopes that weigh them. */
+  measureResiduals(): void {
+    const terms = this.active.length
+    for (let i = 0; i < this.count; i++) {
+      const rest = this.points.order[i]! - rowDot(this.design, this.coefficients, terms, i)
+      this.residualsPx[i] = rest / this.slope[i]!
+    }
   }
 
   private measureSlopes(): void {
@@ -362,8 +373,8 @@ class Fitting {
   }
 }
 
-/** Median of |residual| made equal to the standard deviation of a normal distribution; never under 0.05 px. */
+/** Median of |residual| made equal to the standard deviation of a normal distribution. */
 function robustScale(residualsPx: Float64Array): number {
   const sorted = residualsPx.map(Math.abs).sort()
-  return Math.max(0.05, 1.4826 * (sorted[sorted.length >> 1] ?? 0))
+  return Math.max(LEAST_CLICK_NOISE_PX, 1.4826 * (sorted[sorted.length >> 1] ?? 0))
 }

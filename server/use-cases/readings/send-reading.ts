@@ -1,0 +1,47 @@
+import type { Reading } from '@shared/schemas/readings'
+import { mayMove } from '@shared/workflow/reading-states'
+import { eq } from 'drizzle-orm'
+import type { Actor } from '../../auth/actor'
+import type { AppContext } from '../../context'
+import { inTransaction } from '../../db/client'
+import { recordEvent } from '../../db/events'
+import { readings } from '../../db/schema/readings'
+import { AppError } from '../../errors'
+import { selectCurrentFigure } from '../results/current-figure'
+import { requireOwnReading } from './reading-record'
+import { readReading } from './show-reading'
+
+/** Draft to sent for review. The figure that is sent must be the one of the marks and set-up as they stand. */
+export function sendReading({ db, now }: AppContext, actor: Actor, id: string): Reading {
+  return inTransaction(db, (tx) => {
+    const record = requireOwnReading(tx, actor, id)
+    if (!mayMove(record.state, 'sentForReview')) {
+      throw new AppError('illegalMove', { details: { state: record.state } })
+    }
+    const figure = selectCurrentFigure(tx, record)
+    if (!figure) throw new AppError('figureMissing')
+    const at = now()
+    tx.update(readings)
+      .set({
+        state: 'sentForReview',
+        sentAt: at.toISOString(),
+        updatedAt: at.toISOString(),
+        sentBackReason: null,
+      })
+      .where(eq(readings.id, id))
+      .run()
+    recordEvent(tx, {
+      kind: 'reading.sentForReview',
+      subject: { type: 'reading', id },
+      actor,
+      data: {
+        resultId: figure.id,
+        flatnessUm: figure.flatnessUm,
+        expandedUncertaintyUm: figure.expandedUncertaintyUm,
+        verdict: figure.verdict,
+      },
+      at,
+    })
+    return readReading(tx, actor, id)
+  })
+}

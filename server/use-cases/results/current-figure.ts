@@ -1,0 +1,30 @@
+import { ENGINE_VERSION } from '@shared/metrology'
+import type { Connection } from '../../db/client'
+import { canonicalJson } from '../../db/events'
+import { AppError } from '../../errors'
+import type { ReadingRecord } from '../readings/reading-record'
+import { gatherInputs } from './result-inputs'
+import { type ResultRecord, requireResult } from './select-result'
+
+/**
+ * The reading's latest figure, if computing it again would give the same: not the marks alone count, but also the
+ * set-up, the equipment and the face's sizes and tolerance, which others may have changed meanwhile.
+ */
+export function selectCurrentFigure(db: Connection, record: ReadingRecord): ResultRecord | null {
+  if (record.latestResultId === null) return null
+  const result = requireResult(db, record.latestResultId)
+  if (result.outcome !== 'figure' || result.engineVersion !== ENGINE_VERSION) return null
+  const now = gatherOrNull(db, record)
+  if (!now) return null
+  const same = canonicalJson(now) === canonicalJson({ face: result.face, inputs: result.inputs })
+  return same ? result : null
+}
+
+function gatherOrNull(db: Connection, record: ReadingRecord) {
+  try {
+    return gatherInputs(db, record)
+  } catch (error) {
+    if (error instanceof AppError) return null
+    throw error
+  }
+}

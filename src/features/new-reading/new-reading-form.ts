@@ -1,0 +1,96 @@
+import type { Equipment, EquipmentKind } from '@shared/schemas/equipment'
+import type { TypedHeight } from '@shared/schemas/parts'
+import { newReadingSchema } from '@shared/schemas/readings'
+import { candidateResolver } from '@/lib/candidate-resolver'
+
+/** A new reading as its form has it; '' and null are "not stated". */
+export interface NewReadingForm {
+  pieceId: string
+  faceId: string
+  lightSourceId: string
+  referenceFlatId: string
+  cameraSetUpId: string
+  thermometerId: string
+  viewingAngleDeg: number | null
+  viewingAngleUDeg: number | null
+  mirrored: boolean
+  airTemperatureC: number | null
+  partTemperatureC: number | null
+  soakMinutes: number | null
+  temperatureHalfWidthUm: TypedHeight | null
+  meanGapUm: TypedHeight | null
+  supportHalfWidthUm: TypedHeight | null
+  note: string
+}
+
+export const blankReading: NewReadingForm = {
+  pieceId: '',
+  faceId: '',
+  lightSourceId: '',
+  referenceFlatId: '',
+  cameraSetUpId: '',
+  thermometerId: '',
+  viewingAngleDeg: null,
+  viewingAngleUDeg: null,
+  mirrored: false,
+  airTemperatureC: null,
+  partTemperatureC: null,
+  soakMinutes: null,
+  temperatureHalfWidthUm: null,
+  meanGapUm: null,
+  supportHalfWidthUm: null,
+  note: '',
+}
+
+/** Without a light source nothing can be computed, so its lack is said here already. */
+export const newReadingResolver = candidateResolver(
+  newReadingSchema.refine(({ setUp }) => setUp.lightSourceId !== null, {
+    path: ['setUp', 'lightSourceId'],
+    message: 'reading.lightSource.missing',
+  }),
+  candidateOf,
+  fieldOf,
+)
+
+function candidateOf(form: NewReadingForm): unknown {
+  return {
+    pieceId: form.pieceId,
+    faceId: form.faceId,
+    setUp: {
+      lightSourceId: form.lightSourceId || null,
+      referenceFlatId: form.referenceFlatId || null,
+      cameraSetUpId: form.cameraSetUpId || null,
+      thermometerId: form.thermometerId || null,
+      viewingAngleDeg: form.viewingAngleDeg,
+      viewingAngleUDeg: form.viewingAngleUDeg,
+      mirrored: form.mirrored,
+    },
+    conditions: {
+      airTemperatureC: form.airTemperatureC,
+      partTemperatureC: form.partTemperatureC,
+      soakMinutes: form.soakMinutes,
+      temperatureHalfWidthUm: form.temperatureHalfWidthUm?.valueUm ?? null,
+      meanGapUm: form.meanGapUm?.valueUm ?? null,
+      supportHalfWidthUm: form.supportHalfWidthUm?.valueUm ?? null,
+      note: form.note,
+    },
+  }
+}
+
+function fieldOf(path: string): keyof NewReadingForm {
+  const last = path.split('.').at(-1) ?? ''
+  return last in blankReading ? (last as keyof NewReadingForm) : 'pieceId'
+}
+
+/** The field that names equipment of a kind. */
+export const fieldOfKind = {
+  lightSource: 'lightSourceId',
+  referenceFlat: 'referenceFlatId',
+  cameraSetUp: 'cameraSetUpId',
+  thermometer: 'thermometerId',
+} as const satisfies Record<EquipmentKind, keyof NewReadingForm>
+
+/** What is in service, by kind. */
+export function inServiceOf(rows: readonly Equipment[], kind: EquipmentKind): Equipment[] {
+  return rows.filter((row) => row.inService && row.details.kind === kind)
+}

@@ -1,0 +1,20 @@
+/** Every key of the query store. Lists and single things share the first word, so that one call refreshes both. */
+export const queryKeys = {
+  session: ['session'],
+  settings: ['settings'],
+  home: ['home'],
+  people: ['people'],
+  customers: ['customers'],
+  parts: ['parts'],
+  partList: (search: string) => ['parts', 'list', search],
+  part: (id: string) => ['parts', 'one', id],
+  pieces: ['pieces'],
+  pieceList: (filters: object) => ['pieces', 'list', filters],
+  piece: (id: string) => ['pieces', 'one', id],
+  readings: ['readings'],
+  readingList: (filters: object) => ['readings', 'list', filters],
+  reading: (id: string) => ['readings', 'one', id],
+  equipment: ['equipment'],
+  search: (text: string) => ['search', text],
+  events: (subjectType: string, subjectId: string) => ['events', subjectType, subjectId],
+} as const

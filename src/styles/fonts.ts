@@ -1,0 +1,10 @@
+import '@fontsource/source-sans-3/latin-300.css'
+import '@fontsource/source-sans-3/latin-400.css'
+import '@fontsource/source-sans-3/latin-600.css'
+import '@fontsource/source-sans-3/latin-ext-300.css'
+import '@fontsource/source-sans-3/latin-ext-400.css'
+import '@fontsource/source-sans-3/latin-ext-600.css'
+// Angles, wavelengths and micro signs of some keyboards are Greek.
+import '@fontsource/source-sans-3/greek-300.css'
+import '@fontsource/source-sans-3/greek-400.css'
+import '@fontsource/source-sans-3/greek-600.css'

@@ -1,0 +1,48 @@
+import { readingListQuerySchema } from '@shared/schemas/readings'
+import { closeDatabase } from '../../server/db/client'
+import { listReadings } from '../../server/use-cases/readings/list-readings'
+import { type LargeShop, makeLargeShop, readingCount } from './large-shop'
+import { type Measurement, measurement } from './measurement'
+import { percentile, timesOf } from './timing'
+
+const queries = [
+  {},
+  { state: 'sentForReview' },
+  { state: 'draft,sentBack' },
+  { mine: 'true' },
+  { mine: 'true', state: 'draft' },
+  { search: 'pn-1017' },
+  { search: 'ring kind 31' },
+  { search: 'customer' },
+  { search: 'nothing of that name' },
+  { limit: '200' },
+]
+
+/** Pages of the list of readings as the server makes them, JSON included, out of 20,000. */
+export async function benchReadingList(folder: string): Promise<Measurement> {
+  const shop = await makeLargeShop(folder)
+  const marks = pageMarks(shop)
+  const ask = (round: number) => {
+    const query = { ...queries[round % queries.length], ...marks[round % marks.length] }
+    JSON.stringify(listPage(shop, query, round))
+  }
+  const times = await timesOf(ask, { rounds: 300, warmUp: 30 })
+  await shop.context.analysis.close()
+  closeDatabase(shop.context.db)
+  return measurement(`list of readings out of ${readingCount}, p95`, percentile(times, 0.95), 25)
+}
+
+function listPage({ context, people }: LargeShop, query: object, round: number) {
+  return listReadings(context, people[round % people.length], readingListQuerySchema.parse(query))
+}
+
+/** The first page, the second, and ones far down. */
+function pageMarks(shop: LargeShop): object[] {
+  const marks: object[] = [{}]
+  let before: string | null | undefined
+  for (let page = 0; page < 60; page++) {
+    before = listPage(shop, { limit: '200', before: before ?? undefined }, 0).next
+    if (before && [0, 20, 59].includes(page)) marks.push({ before })
+  }
+  return marks
+}
