@@ -7,6 +7,20 @@ import type { TracedReading } from './types'
 export const USUAL_DEGREE = 14
 /** For faces with finer waves, down to a tenth. */
 export const FINE_DEGREE = 20
+/** Clicks for each polynomial that they are to choose among; fewer and the waves run through the clicks' own errors. */
+const CLICKS_PER_POLYNOMIAL = 3
+
+/** The highest total degree, up to a limit, that so many clicks can choose among. */
+export function degreeFor(clicks: number, limit: number): number {
+  let degree = 4
+  while (degree < limit && CLICKS_PER_POLYNOMIAL * polynomialCount(degree + 1) <= clicks) degree++
+  return degree
+}
+
+/** Number of polynomials up to a total degree. */
+function polynomialCount(degree: number): number {
+  return ((degree + 1) * (degree + 2)) / 2
+}
 /** Lengths over which a rim's drop may die away, as shares of half the face's size. */
 const RIM_LENGTH_SHARES = [0.04, 0.08, 0.16]
 

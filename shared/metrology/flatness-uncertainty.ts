@@ -14,9 +14,9 @@ const DRAW_PLACES = 2600
  * lies a whole spacing from its neighbours, a place between bands half of one at most. Chosen on seeded
  * drawings of every kind of face so that U covers.
  */
-const SHARE_OF_CROSS_VALIDATION = 0.25
+const SHARE_OF_CROSS_VALIDATION = 0.4
 /** No surface model is better than this, bands: structure finer than it and the rim's pixel steps. */
-const MODEL_FLOOR_BANDS = 0.0025
+const MODEL_FLOOR_BANDS = 0.0035
 
 /** Contributions to the minimum zone from the clicks and the surface between them, bands. */
 export interface SurfaceUncertainty {

@@ -22,8 +22,12 @@ export interface MinimumZoneSolver {
 const MOST_EXCHANGES = 400
 /** Places are moved apart by this share of their extent while contacts are chosen, so that rows and columns of a
  *  grid make no ties; the width of the planes found is then taken over the true places. */
-const JITTER = 1e-9
+const JITTER = 1e-7
 const CLOSE_ENOUGH = 1e-10
+/** A result nearer to the least width than this isn't tried again from another start. */
+const WELL_CONVERGED = 1e-6
+/** References thinner than this (twice their area over the extent's square) settle no plane. */
+const THINNEST = 1e-9
 
 /**
  * Solves minimum zones over the same places again and again. The method is the single exchange on references
@@ -40,28 +44,88 @@ export function createMinimumZoneSolver(xs: ArrayLike<number>, ys: ArrayLike<num
   if (count < 3) throw new RangeError('minimum zone: at least three places are needed')
   const { exactU, exactV, u, v, cx, cy, extent } = scaledPlaces(xs, ys)
   const spread = spreadReference(u, v)
+  const rest = new Float64Array(count)
 
   return {
     solve(zs, start) {
       if (zs.length !== count) throw new RangeError('minimum zone: as many heights as places are needed')
       if (count === 3) return throughThree(exactU, exactV, zs, cx, cy, extent)
-      let reference = (start && start.length === 4 && level(start, u, v, zs)) || level(spread, u, v, zs)
-      if (!reference) throw new RangeError('minimum zone: the places lie on one line')
-      let iterations = 0
-      let worst = worstOf(reference, u, v, zs)
-      while (iterations < MOST_EXCHANGES && worst.departure > reference.departure * (1 + CLOSE_ENOUGH)) {
-        const better = exchange(reference, worst.index, u, v, zs)
-        if (!better) break
-        reference = better
-        worst = worstOf(reference, u, v, zs)
-        iterations++
+      if (spread.length === 0) throw new RangeError('minimum zone: the places lie on one line')
+      // A plane near the final one is taken off first: what is left is small, and so are rounding and jitter in it.
+      const near = planeThrough(
+        spread.slice(0, 3) as [number, number, number],
+        spread.slice(0, 3).map((i) => zs[i]!) as [number, number, number],
+        exactU,
+        exactV,
+      )!
+      for (let i = 0; i < count; i++) rest[i] = zs[i]! - near.a * exactU[i]! - near.b * exactV[i]! - near.c
+      const starts = [...(start && start.length === 4 ? [start] : []), spread, highsAndLows(rest, u, v)]
+      let best: MinimumZone | null = null
+      for (const first of starts) {
+        const reference = level(first, u, v, rest)
+        if (!reference) continue
+        const found = ascend(reference, u, v, exactU, exactV, rest, cx, cy, extent)
+        if (!best || found.width < best.width) best = found
+        if (best.remainder < WELL_CONVERGED) break
       }
-      // The contacts are known; their plane over the true places is the exact one, unless three of them are in line.
-      const exact = level(reference.places, exactU, exactV, zs)
-      const best = exact && exact.departure > reference.departure * (1 - 1e-6) ? exact : reference
-      return finish(best, iterations, exactU, exactV, zs, cx, cy, extent)
+      if (!best) throw new RangeError('minimum zone: the places lie on one line')
+      const { plane } = best
+      const a = plane.a + near.a / extent
+      const b = plane.b + near.b / extent
+      return {
+        ...best,
+        plane: { a, b, c: plane.c + near.c - (near.a * cx) / extent - (near.b * cy) / extent },
+      }
     },
   }
+}
+
+/** Exchanges places while that raises the reference's departure, then takes the plane over the true places. */
+function ascend(
+  start: Reference,
+  u: Float64Array,
+  v: Float64Array,
+  exactU: Float64Array,
+  exactV: Float64Array,
+  zs: Float64Array,
+  cx: number,
+  cy: number,
+  extent: number,
+): MinimumZone {
+  let reference = start
+  let iterations = 0
+  let worst = worstOf(reference, u, v, zs)
+  while (iterations < MOST_EXCHANGES && worst.departure > reference.departure * (1 + CLOSE_ENOUGH)) {
+    const better = exchange(reference, worst.index, u, v, zs)
+    if (!better) break
+    reference = better
+    worst = worstOf(reference, u, v, zs)
+    iterations++
+  }
+  // The contacts are known; their plane over the true places is the exact one, unless three of them are in line.
+  const jittered = finish(reference, iterations, exactU, exactV, zs, cx, cy, extent)
+  const exact = level(reference.places, exactU, exactV, zs)
+  if (!exact) return jittered
+  const finished = finish(exact, iterations, exactU, exactV, zs, cx, cy, extent)
+  return finished.width <= jittered.width ? finished : jittered
+}
+
+/** The two highest and two lowest of places well apart: another place to begin from. */
+function highsAndLows(zs: Float64Array, u: Float64Array, v: Float64Array): number[] {
+  const pick = (sign: number, not: readonly number[]): number => {
+    let best = -1
+    for (let i = 0; i < zs.length; i++) {
+      if (not.some((k) => Math.hypot(u[i]! - u[k]!, v[i]! - v[k]!) < 0.3)) continue
+      if (best < 0 || sign * zs[i]! > sign * zs[best]!) best = i
+    }
+    return best
+  }
+  const picked: number[] = []
+  for (const sign of [1, -1, 1, -1]) {
+    const i = pick(sign, picked)
+    if (i >= 0) picked.push(i)
+  }
+  return picked
 }
 
 /** The minimum zone of one set of places. */
@@ -139,7 +203,7 @@ function level(
     -triangle(p, q, r, u, v),
   ]
   const total = Math.abs(lambda[0]!) + Math.abs(lambda[1]!) + Math.abs(lambda[2]!) + Math.abs(lambda[3]!)
-  if (!(total > 1e-15)) return null
+  if (!(total > THINNEST)) return null
   let sum = 0
   for (let k = 0; k < 4; k++) sum += lambda[k]! * zs[places[k]!]!
   const signed = sum / total

@@ -4,7 +4,7 @@ import { readBands, worstBand } from './band-readings'
 import { drawUpBudget, expandedUncertaintyUm, notStatedIn } from './budget'
 import { leaveOutBands } from './cross-validation'
 import { designMatrix } from './design-matrix'
-import { acrossMmOf, FINE_DEGREE, faceBasis, USUAL_DEGREE } from './face-basis'
+import { acrossMmOf, degreeFor, FINE_DEGREE, faceBasis, USUAL_DEGREE } from './face-basis'
 import { surfaceUncertainty } from './flatness-uncertainty'
 import { type FormFit, fitForm, formStatements, formWord } from './form-terms'
 import {
@@ -74,9 +74,9 @@ function refused(findings: readonly Finding[]): ReadingOutcome {
 
 function tryFit(points: TracedPoints, reading: TracedReading, frame: PartFrame): SurfaceFit | null {
   try {
-    const usual = fitSurface(points, faceBasis(reading, frame, USUAL_DEGREE))
+    const usual = fitSurface(points, faceBasis(reading, frame, degreeFor(points.count, USUAL_DEGREE)))
     if (!holdsFinerWaves(usual, points)) return usual
-    return fitSurface(points, faceBasis(reading, frame, FINE_DEGREE))
+    return fitSurface(points, faceBasis(reading, frame, degreeFor(points.count, FINE_DEGREE)))
   } catch (error) {
     if (error instanceof RangeError) return null
     throw error
@@ -86,13 +86,10 @@ function tryFit(points: TracedPoints, reading: TracedReading, frame: PartFrame):
 /** Degrees just under the usual limit, and the share of them that the data must determine to look beyond it. */
 const TOP_DEGREES = 3
 const FINER_SHARE = 0.3
-/** Clicks per function that finer waves ask for. */
-const CLICKS_PER_FUNCTION = 2
 
 /** Whether the highest usual degrees are still in play, so that the face may hold waves finer than them. */
 function holdsFinerWaves(fit: SurfaceFit, points: TracedPoints): boolean {
-  const functions = ((FINE_DEGREE + 1) * (FINE_DEGREE + 2)) / 2
-  if (points.count < CLICKS_PER_FUNCTION * functions) return false
+  if (degreeFor(points.count, FINE_DEGREE) <= USUAL_DEGREE) return false
   let determined = 0
   let count = 0
   fit.basis.degreeOf.forEach((degree, f) => {

@@ -51,6 +51,9 @@ const HUBER_LIMIT = 2.5
 const SET_ASIDE_LIMIT = 5
 /** No hand and no program finds a band's centre better than this; it keeps exact clicks from asking for every function. */
 const LEAST_CLICK_NOISE_PX = 0.05
+/** What a hand's error usually is, worth so many clicks beside the clicks themselves: few clicks can't deny it. */
+const USUAL_CLICK_NOISE_PX = 0.5
+const USUAL_NOISE_WORTH = 8
 const REWEIGHTINGS = 8
 const EVIDENCE_STEPS = 12
 /** The evidence has settled when no component that matters changes its deviation by more than this share. */
@@ -127,8 +130,8 @@ function refine(fit: Fitting): SurfaceFit {
 /** The state of one fit; every array is allocated once and shrinks only when functions are left out. */
 class Fitting {
   noise = 0.1
-  /** Once the weights are in px, noise is too. */
-  private leastNoise = 1e-6
+  /** Whether weights and noise are in px yet; at first they are in bands. */
+  private inPixels = false
   private readonly count: number
   private active: Int32Array
   private design: Float64Array
@@ -193,7 +196,7 @@ class Fitting {
       this.solvePosterior()
       invertLower(this.precision, terms, this.inverse)
       settled = this.updateScales() < SETTLED_SHARE
-      this.noise = Math.max(this.leastNoise, this.weightedNoise())
+      this.noise = this.weightedNoise()
     }
     this.mixVariances()
     this.solvePosterior()
@@ -281,13 +284,20 @@ class Fitting {
       sum += w * r * r
       used++
     }
-    return Math.max(1e-6, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+    return this.noiseOf(sum, used)
+  }
+
+  private noiseOf(weightedSquares: number, used: number): number {
+    const freedom = Math.max(1, used - this.effectiveTerms)
+    if (!this.inPixels) return Math.max(1e-6, Math.sqrt(weightedSquares / freedom))
+    const usual = USUAL_NOISE_WORTH * USUAL_CLICK_NOISE_PX ** 2
+    return Math.sqrt((weightedSquares + usual) / (freedom + USUAL_NOISE_WORTH))
   }
 
   /** Residuals in px, robust weights, row weights and click noise from the surface as it stands. */
   reweigh(): void {
     this.measureSlopes()
-    this.leastNoise = LEAST_CLICK_NOISE_PX
+    this.inPixels = true
     this.measureResiduals()
     const { count, residualsPx, weights, rowWeight, slope } = this
     const freedom = Math.max(1, count - this.effectiveTerms)
@@ -302,7 +312,7 @@ class Fitting {
       sum += weights[i]! * residualsPx[i]! * residualsPx[i]!
       used++
     }
-    this.noise = Math.max(LEAST_CLICK_NOISE_PX, Math.sqrt(sum / Math.max(1, used - this.effectiveTerms)))
+    this.noise = this.noiseOf(sum, used)
   }
 
   /** Distances of the clicks from the fitted bands, px, by the slopes that weigh them. */

@@ -3,9 +3,9 @@ import type { PointPx } from '@shared/schemas/shapes'
 import { removeSelected } from './geometry/edit-marks'
 import { handlesOf, moveSelected } from './geometry/handles'
 import {
+  cancelGesture,
   canRedo,
   canUndo,
-  cancelGesture,
   change,
   closeGesture,
   during,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { fit, fitBox, lookAt, pan, pinch, toPhoto, toScreen, zoomAbout, zoomTo } from './viewport'
+import { fitBox, fitPhoto, lookAt, pan, pinch, toPhoto, toScreen, zoomAbout, zoomTo } from './viewport'
 
 const area = { width: 792, height: 674 }
 const start = { scale: 0.5, offsetX: 40, offsetY: -12 }
@@ -15,7 +15,7 @@ describe('the view of the photograph', () => {
   })
 
   it('shows the whole photograph in the middle when fitted', () => {
-    const view = fit({ width: 4000, height: 3000 }, area)
+    const view = fitPhoto({ width: 4000, height: 3000 }, area)
     expect(toScreen(view, { x: -0.5, y: -0.5 }).x).toBeGreaterThanOrEqual(-1e-9)
     expect(toScreen(view, { x: 3999.5, y: 2999.5 }).x).toBeLessThanOrEqual(area.width + 1e-9)
     const middle = toScreen(view, { x: 1999.5, y: 1499.5 })

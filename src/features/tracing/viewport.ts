@@ -31,7 +31,7 @@ export function toPhoto({ scale, offsetX, offsetY }: Viewport, { x, y }: Place):
 }
 
 /** The whole photograph, in the middle. */
-export function fit(photo: Size, area: Size): Viewport {
+export function fitPhoto(photo: Size, area: Size): Viewport {
   return fitBox({ x: -0.5, y: -0.5, ...photo }, area, 0)
 }
 

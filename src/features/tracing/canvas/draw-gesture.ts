@@ -44,11 +44,14 @@ function drawSelectedMark(pen: Pen, marks: Marks, selection: Selection, pressWor
       return
     }
     case 'outline':
-      return drawOutline(pen, marks.outline, true)
+      drawOutline(pen, marks.outline, true)
+      return
     case 'pressArrow':
-      return drawPressArrow(pen, marks.pressArrow, pressWord, true)
+      drawPressArrow(pen, marks.pressArrow, pressWord, true)
+      return
     case 'straightedge':
-      return drawStraightedge(pen, marks.straightedge, true)
+      drawStraightedge(pen, marks.straightedge, true)
+      return
   }
 }
 
@@ -57,13 +60,17 @@ export function drawGesture(pen: Pen, { tool, options, profile }: TableState): v
   if (profile && tool.tool === 'profile') drawProfileLine(pen, profile.from, profile.to)
   switch (tool.tool) {
     case 'face':
-      return drawFaceGesture(pen, tool, options)
+      drawFaceGesture(pen, tool, options)
+      return
     case 'leaveOut':
-      return drawLeaveOutGesture(pen, tool, options)
+      drawLeaveOutGesture(pen, tool, options)
+      return
     case 'band':
-      return drawBandGesture(pen, tool)
+      drawBandGesture(pen, tool)
+      return
     case 'straightedge':
-      return drawPlaced(pen, tool.points, tool.hover, tool.points.length < 2)
+      drawPlaced(pen, tool.points, tool.hover, tool.points.length < 2)
+      return
     case 'number':
       if (tool.phase === 'pressing') strokeDashed(pen, () => tracePath(pen, tool.path), ink.selected)
       return
@@ -88,7 +95,10 @@ function drawFaceGesture(pen: Pen, { points, hover }: Gesture<'face'>, { faceWay
 }
 
 function drawLeaveOutGesture(pen: Pen, { points, hover }: Gesture<'leaveOut'>, options: ToolOptions): void {
-  if (options.leaveOutWay !== 'circle') return drawPlaced(pen, points, hover, options.leaveOutWay === 'polygon')
+  if (options.leaveOutWay !== 'circle') {
+    drawPlaced(pen, points, hover, options.leaveOutWay === 'polygon')
+    return
+  }
   const centre = points[0]
   if (!centre) return
   drawCross(pen, centre)
@@ -101,6 +111,7 @@ function drawBandGesture(pen: Pen, { points, hover }: Gesture<'band'>): void {
   if (points.length === 0) return
   strokeCased(pen, () => tracePath(pen, points), true)
   if (hover) strokeDashed(pen, () => tracePath(pen, [points[points.length - 1], hover]), ink.selected)
-  points.forEach((point, i) => drawHandle(pen, point, i === points.length - 1))
+  points.forEach((point, i) => {
+    drawHandle(pen, point, i === points.length - 1)
+  })
 }
-

@@ -1,7 +1,7 @@
 import { copiesOf } from '@shared/geometry/shape'
 import type { LeaveOut, Marks, Trace } from '@shared/schemas/marks'
 import type { PointPx } from '@shared/schemas/shapes'
-import { middleOfPath } from '../geometry/paths'
+import { middleOfPath, pathLength } from '../geometry/paths'
 import { rimPlace } from '../geometry/shape-path'
 import { toScreen } from '../viewport'
 import {
@@ -62,15 +62,24 @@ export function drawTrace(pen: Pen, { points }: Pick<Trace, 'points'>, isSelecte
   else strokeCased(pen, () => tracePath(pen, points), isSelected)
 }
 
+const shortestArrowPx = 56
+
 /** From a ring where the finger presses to a filled head. */
-export function drawPressArrow(pen: Pen, arrow: Marks['pressArrow'], label: string, isSelected: boolean): void {
+export function drawPressArrow(
+  pen: Pen,
+  arrow: Marks['pressArrow'],
+  label: string,
+  isSelected: boolean,
+): void {
   if (!arrow) return
   const { context, viewport } = pen
+  const own = Math.hypot(arrow.dx, arrow.dy)
+  if (own === 0) return
+  const [ux, uy] = [arrow.dx / own, arrow.dy / own]
+  // Any length says the same, but a short one couldn't be seen.
+  const length = Math.max(shortestArrowPx, own * viewport.scale)
   const tail = toScreen(viewport, arrow)
-  const tip = toScreen(viewport, { x: arrow.x + arrow.dx, y: arrow.y + arrow.dy })
-  const length = Math.hypot(tip.x - tail.x, tip.y - tail.y)
-  if (length < 1) return
-  const [ux, uy] = [(tip.x - tail.x) / length, (tip.y - tail.y) / length]
+  const tip = { x: tail.x + ux * length, y: tail.y + uy * length }
   const head = Math.min(17, length * 0.6)
   const colour = isSelected ? ink.selected : ink.line
   const shaft = () => {
@@ -162,19 +171,33 @@ export function drawProfileLine(pen: Pen, from: PointPx, to: PointPx): void {
 /** Nearer than this on screen chips crowd, and only first, last, fives and selected are shown. */
 const crowdedPx = 22
 
-/** A chip for each numbered band on its middle; pieces of one band share the number. */
-export function drawNumbers(pen: Pen, traces: readonly Trace[], selectedId: string | null): void {
-  const numbered = traces.filter(({ order }) => order !== null)
+/** A chip for each numbered band on its middle: on the longest of its pieces, or on all of them. */
+export function drawNumbers(pen: Pen, traces: readonly Trace[], onAllPieces: boolean): void {
+  const numbered = onAllPieces ? traces.filter(({ order }) => order !== null) : longestPieces(traces)
   const places = numbered.map(({ points }) => middleOfPath(points))
   const orders = numbered.map(({ order }) => order ?? 0)
   const isCrowded = nearestPx(places, pen.viewport.scale) < crowdedPx
   const [least, most] = [Math.min(...orders), Math.max(...orders)]
-  numbered.forEach(({ id, order }, i) => {
+  numbered.forEach(({ order }, i) => {
     const n = order ?? 0
-    const isSelected = id === selectedId
-    if (isCrowded && !isSelected && n !== least && n !== most && n % 5 !== 0) return
-    drawChip(pen, { text: String(n).replace('-', '\u2212'), place: places[i], isSelected })
+    if (isCrowded && n !== least && n !== most && !isRoundBetween(n, least, most)) return
+    drawChip(pen, { text: String(n).replace('-', '\u2212'), place: places[i] })
   })
+}
+
+/** Fives, but not those that would lie on the first or the last. */
+function isRoundBetween(n: number, least: number, most: number): boolean {
+  return n % 5 === 0 && n - least > 2 && most - n > 2
+}
+
+function longestPieces(traces: readonly Trace[]): Trace[] {
+  const longest = new Map<number, { trace: Trace; lengthPx: number }>()
+  for (const trace of traces) {
+    if (trace.order === null) continue
+    const lengthPx = pathLength(trace.points)
+    if (lengthPx > (longest.get(trace.order)?.lengthPx ?? -1)) longest.set(trace.order, { trace, lengthPx })
+  }
+  return [...longest.values()].map(({ trace }) => trace)
 }
 
 /** Median distance of each chip to the one nearest to it. */
@@ -191,9 +214,9 @@ function nearestPx(places: readonly PointPx[], scale: number): number {
 }
 
 /** A diamond at the place of a mistake. */
-export function drawProblem({ context, viewport }: Pen, [x, y]: PointPx, isNear: boolean): void {
+export function drawProblem({ context, viewport }: Pen, [x, y]: PointPx): void {
   const at = toScreen(viewport, { x, y })
-  const r = isNear ? 9 : 7
+  const r = 7
   context.beginPath()
   context.moveTo(at.x, at.y - r)
   context.lineTo(at.x + r, at.y)

@@ -20,7 +20,7 @@ import {
   drawTrace,
 } from './draw-marks'
 import { Painted } from './painted'
-import type { Pen } from './pen'
+import { drawChip, type Pen } from './pen'
 import type { View } from './use-viewport'
 
 interface Props {
@@ -34,8 +34,13 @@ export const MarksLayer = memo(function MarksLayer({ view, frame, problems }: Pr
   const { t } = useTranslation('table')
   const marks = useTable(marksOf)
   const selection = useTable((table) => table.selection)
+  const isNumbering = useTable((table) => table.tool.tool === 'number')
   const still = useStill(marks, selection)
-  const edgePaths = useMemo(() => (frame ? edgeBandPaths(marks, frame) : []), [frame, marks])
+  const { outline, leaveOuts, edgeBandMm } = marks
+  const edgePaths = useMemo(
+    () => (frame ? edgeBandPaths({ outline, leaveOuts, edgeBandMm }, frame) : []),
+    [frame, outline, leaveOuts, edgeBandMm],
+  )
   const press = t('stage.press')
 
   const drawStill = useCallback(
@@ -52,10 +57,13 @@ export const MarksLayer = memo(function MarksLayer({ view, frame, problems }: Pr
   const drawEdge = useCallback((pen: Pen) => drawEdgeBand(pen, edgePaths), [edgePaths])
   const drawNotes = useCallback(
     (pen: Pen) => {
-      drawNumbers(pen, still.traces, null)
-      for (const { place, code } of problems) if (code !== 'noNumber') drawProblem(pen, place, false)
+      drawNumbers(pen, still.traces, isNumbering)
+      for (const { place, code } of problems) {
+        if (code === 'noNumber') drawChip(pen, { text: '?', place, attention: true })
+        else drawProblem(pen, place)
+      }
     },
-    [still, problems],
+    [still, problems, isNumbering],
   )
   return (
     <Layer listening={false}>
@@ -66,10 +74,7 @@ export const MarksLayer = memo(function MarksLayer({ view, frame, problems }: Pr
   )
 })
 
-type Still = Pick<
-  Marks,
-  'outline' | 'leaveOuts' | 'traces' | 'straightedge' | 'pressArrow' | 'datumMarks'
->
+type Still = Pick<Marks, 'outline' | 'leaveOuts' | 'traces' | 'straightedge' | 'pressArrow' | 'datumMarks'>
 
 /** The marks without what is selected; the same object as long as nothing of it changes. */
 function useStill(marks: Marks, selection: Selection | null): Still {

@@ -31,20 +31,18 @@ export function PhotoStage({ areaRef, photo, view, frame, problems, showMarks, i
   const { image, failed } = usePhoto(photo, wantsFull(photo, viewport.scale))
   return (
     <div className="relative size-full min-h-0 min-w-0 overflow-hidden bg-[#0f1113]">
-      {/* biome-ignore lint/a11y/noNoninteractiveTabindex: an application takes the keyboard itself. */}
-      {/* biome-ignore lint/a11y/noNoninteractiveElementInteractions: as above. */}
       <div
         ref={areaRef}
         role="application"
         aria-label={t('stage.label')}
         aria-describedby="table-what-next"
-        // biome-ignore lint/a11y/noNoninteractiveTabindex: as above.
+        // biome-ignore lint/a11y/noNoninteractiveTabindex: an application takes the keyboard itself.
         tabIndex={0}
         data-tool={tool}
         data-scale={viewport.scale}
         data-offset-x={viewport.offsetX}
         data-offset-y={viewport.offsetY}
-        className={`absolute inset-0 touch-none select-none outline-offset-[-2px] ${cursorOf(tool)}`}
+        className={`absolute inset-0 touch-none select-none outline-none after:pointer-events-none after:absolute after:inset-0 focus-visible:after:shadow-[inset_0_0_0_2px_var(--iris)] ${cursorOf(tool)}`}
       >
         {area.width > 0 && (
           <Stage width={area.width} height={area.height} listening={false}>

@@ -8,7 +8,8 @@ export interface LoadedPhoto {
 
 const firstWidthPx = 2048
 
-const addressOf = ({ sha256 }: Photo, width: number | 'full') => `/api/photos/${sha256}/preview?width=${width}`
+const addressOf = ({ sha256 }: Photo, width: number | 'full') =>
+  `/api/photos/${sha256}/preview?width=${width}`
 
 /** A middling preview first; the full size once `wantsFull`, the one before staying until it is there. */
 export function usePhoto(photo: Photo | null, wantsFull: boolean): LoadedPhoto {

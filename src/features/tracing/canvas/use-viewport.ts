@@ -1,5 +1,5 @@
 import { type RefObject, useCallback, useEffect, useRef, useState } from 'react'
-import { fit, fitBox, type Size, type Viewport } from '../viewport'
+import { fitBox, fitPhoto, type Size, type Viewport } from '../viewport'
 
 export interface View {
   viewport: Viewport
@@ -47,14 +47,13 @@ export function useViewport(
   const fitAll = useCallback(() => {
     if (!photo || area.width === 0) return
     isMoved.current = false
-    put(fit(photo, area))
+    put(fitPhoto(photo, area))
   }, [photo, area, put])
 
   useEffect(() => {
     if (!photo || area.width === 0 || isMoved.current) return
-    put(openingBox.current ? fitBox(openingBox.current, area) : fit(photo, area))
+    put(openingBox.current ? fitBox(openingBox.current, area) : fitPhoto(photo, area))
   }, [photo, area, put])
 
   return { viewport, area, change, latest, fitAll }
 }
-

@@ -4,8 +4,10 @@ import type { Marks } from '@shared/schemas/marks'
 import type { PointPx, Shape } from '@shared/schemas/shapes'
 import { centreOfShape, rimOf } from './shape-path'
 
+type EdgeBand = Pick<Marks, 'outline' | 'leaveOuts' | 'edgeBandMm'>
+
 /** Closed paths of the edge band's inner rims: within the outline, and round the bores. */
-export function edgeBandPaths(marks: Marks, frame: PartFrame): readonly (readonly PointPx[])[] {
+export function edgeBandPaths(marks: EdgeBand, frame: PartFrame): readonly (readonly PointPx[])[] {
   const { outline, edgeBandMm } = marks
   if (!outline || edgeBandMm <= 0) return []
   const bores = marks.leaveOuts.flatMap(copiesOf).filter(({ kind }) => kind !== 'polygon')
@@ -18,7 +20,8 @@ export function edgeBandPaths(marks: Marks, frame: PartFrame): readonly (readonl
 /** The rim moved out by a length on the part (in, below 0). */
 function shiftedRim(shape: Shape, frame: PartFrame, outMm: number): PointPx[] {
   const rimMm = rimOf(shape).map(([x, y]) => frame.toMm(x, y))
-  const moved = shape.kind === 'polygon' ? shiftedPolygon(rimMm, outMm) : shiftedRound(rimMm, shape, frame, outMm)
+  const moved =
+    shape.kind === 'polygon' ? shiftedPolygon(rimMm, outMm) : shiftedRound(rimMm, shape, frame, outMm)
   return moved.map(([x, y]): PointPx => {
     const [xPx, yPx] = frame.toPx(x, y)
     return [xPx, yPx]

@@ -90,11 +90,15 @@ export function boxesMeet(a: Box, b: Box): boolean {
   return a.left <= b.right && b.left <= a.right && a.top <= b.bottom && b.top <= a.bottom
 }
 
-/** The place half way along a path by length. */
-export function middleOfPath(points: readonly PointPx[]): PointPx {
+export function pathLength(points: readonly PointPx[]): number {
   let total = 0
   for (let i = 1; i < points.length; i += 1) total += distance(points[i - 1], points[i])
-  let left = total / 2
+  return total
+}
+
+/** The place half way along a path by length. */
+export function middleOfPath(points: readonly PointPx[]): PointPx {
+  let left = pathLength(points) / 2
   for (let i = 1; i < points.length; i += 1) {
     const length = distance(points[i - 1], points[i])
     if (length > 0 && left <= length) return between(points[i - 1], points[i], left / length)

@@ -24,10 +24,7 @@ export interface LatestReader {
 const pauseMs = 30
 
 /** Reads the latest marks, one reading at a time; what came meanwhile is skipped but for the last. */
-export function startLatestReader(
-  worker: ReadingWorker,
-  onRead: (latest: LatestRead) => void,
-): LatestReader {
+export function startLatestReader(worker: ReadingWorker, onRead: (latest: LatestRead) => void): LatestReader {
   let number = 0
   let atWork: ReadRequest | null = null
   let waiting: Omit<ReadRequest, 'number'> | null = null

@@ -1,4 +1,10 @@
-import { figureForStorage, type MarkedPhoto, readTraces, storedFinding, toReadingInput } from '@shared/metrology'
+import {
+  figureForStorage,
+  type MarkedPhoto,
+  readTraces,
+  storedFinding,
+  toReadingInput,
+} from '@shared/metrology'
 import type { Marks } from '@shared/schemas/marks'
 import type { Figure } from '@shared/schemas/results'
 import { findProblems, type Problem } from '../problems'

@@ -44,15 +44,12 @@ export async function whenLastSaveIsThrough(readingId: string): Promise<void> {
 export function useAutosave(
   store: TableStore,
   reading: Reading,
-  unsavedCopy: Marks | null,
-  opening: StaleSave | null,
+  overtaken: { mine: Marks; stale: StaleSave } | null,
 ): Saving {
   const [state, setState] = useState<SaveState>(
-    opening ? { kind: 'stale', stale: opening } : { kind: 'saved', savedAt: null },
+    overtaken ? { kind: 'stale', stale: overtaken.stale } : { kind: 'saved', savedAt: null },
   )
-  const [conflict, setConflict] = useState<Conflict | null>(
-    opening && unsavedCopy ? { stale: opening, mine: unsavedCopy, theirs: null } : null,
-  )
+  const [conflict, setConflict] = useState<Conflict | null>(overtaken && { ...overtaken, theirs: null })
   const autosave = useRef<Autosave | null>(null)
   const halted = useRef(conflict !== null)
   halted.current = conflict !== null

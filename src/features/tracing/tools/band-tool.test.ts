@@ -50,7 +50,9 @@ describe('the band tool', () => {
   })
 
   it('carries a band on from its last end', () => {
-    const hand = atTheTable('band', { traces: uprightBands([50, 4]) }).click([51, 99], [50, 140]).enter()
+    const hand = atTheTable('band', { traces: uprightBands([50, 4]) })
+      .click([51, 99], [50, 140])
+      .enter()
     expect(hand.marks.traces).toHaveLength(1)
     expect(hand.marks.traces[0]).toMatchObject({ order: 4 })
     expect(hand.marks.traces[0].points.at(-1)).toEqual([50, 140])
@@ -58,7 +60,9 @@ describe('the band tool', () => {
   })
 
   it('carries a band on from its first end, and keeps its sense', () => {
-    const hand = atTheTable('band', { traces: uprightBands([50, 4]) }).click([50, 1], [50, -40]).enter()
+    const hand = atTheTable('band', { traces: uprightBands([50, 4]) })
+      .click([50, 1], [50, -40])
+      .enter()
     expect(hand.marks.traces[0].points).toEqual([
       [50, -40],
       [50, 0],
@@ -68,7 +72,9 @@ describe('the band tool', () => {
   })
 
   it('starts a new band beside an end when Shift is held', () => {
-    const hand = atTheTable('band', { traces: uprightBands(50) }).down([50, 99], true).up([50, 99])
+    const hand = atTheTable('band', { traces: uprightBands(50) })
+      .down([50, 99], true)
+      .up([50, 99])
     expect(hand.click([50, 140]).enter().marks.traces).toHaveLength(2)
   })
 

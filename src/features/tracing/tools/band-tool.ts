@@ -17,7 +17,8 @@ export function stepBand(state: BandState, event: ToolEvent, scene: Scene): Step
   if (event.type === 'end' || event.type === 'doubleClick') return end(state, scene)
   if (state.phase === 'idle' && event.type === 'pointerDown' && !event.shift) {
     const carried = carryOn(event, scene)
-    if (carried) return { state: carried, selection: { kind: 'trace', id: carried.continues.id, point: null } }
+    if (carried)
+      return { state: carried, selection: { kind: 'trace', id: carried.continues.id, point: null } }
   }
   const fixed = state.continues?.count ?? 0
   const next = placePoints(state, event, fixed)

@@ -61,7 +61,9 @@ describe('the number tool', () => {
   })
 
   it('takes a typed number for the band that was clicked', () => {
-    const hand = atTheTable('number', { traces: uprightBands(10, 20) }).click([20, 30]).type('12')
+    const hand = atTheTable('number', { traces: uprightBands(10, 20) })
+      .click([20, 30])
+      .type('12')
     expect(orders(hand.marks)).toEqual([null, 12])
     expect(orders(hand.backspace().marks)).toEqual([null, 1])
     expect(orders(hand.backspace().type('-3').marks)).toEqual([null, -3])

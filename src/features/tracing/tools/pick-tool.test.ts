@@ -12,13 +12,17 @@ describe('picking and moving', () => {
   })
 
   it('drags one point of the selected band, in one step', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50) }).click([50, 25]).drag([51, 49], [61, 44])
+    const hand = atTheTable('pick', { traces: uprightBands(50) })
+      .click([50, 25])
+      .drag([51, 49], [61, 44])
     expect(hand.marks.traces[0].points[1]).toEqual([60, 45])
     expect(hand.undo().marks.traces).toEqual(uprightBands(50))
   })
 
   it('drags the whole of a selected band by its line', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50) }).click([50, 25]).drag([50, 25], [60, 35])
+    const hand = atTheTable('pick', { traces: uprightBands(50) })
+      .click([50, 25])
+      .drag([50, 25], [60, 35])
     expect(hand.marks.traces[0].points).toEqual([
       [60, 10],
       [60, 60],
@@ -35,7 +39,9 @@ describe('picking and moving', () => {
   })
 
   it('inserts a point where the selected line is double-clicked', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50) }).click([50, 25]).doubleClick([50, 24])
+    const hand = atTheTable('pick', { traces: uprightBands(50) })
+      .click([50, 25])
+      .doubleClick([50, 24])
     expect(hand.marks.traces[0].points).toHaveLength(4)
     expect(hand.marks.traces[0].points[1]).toEqual([50, 24])
   })
@@ -48,7 +54,9 @@ describe('picking and moving', () => {
   })
 
   it('deletes the selected point, and then the band', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50, 80) }).click([50, 25]).click([50, 50])
+    const hand = atTheTable('pick', { traces: uprightBands(50, 80) })
+      .click([50, 25])
+      .click([50, 50])
     hand.do({ type: 'delete' })
     expect(hand.marks.traces[0].points).toHaveLength(2)
     hand.do({ type: 'delete' })
@@ -57,7 +65,9 @@ describe('picking and moving', () => {
   })
 
   it('moves the selected point by the arrow keys', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50) }).click([50, 25]).click([50, 50])
+    const hand = atTheTable('pick', { traces: uprightBands(50) })
+      .click([50, 25])
+      .click([50, 50])
     hand.do({ type: 'nudge', dx: 1, dy: 0 }).do({ type: 'nudge', dx: 0, dy: -10 })
     expect(hand.marks.traces[0].points[1]).toEqual([51, 40])
   })
@@ -83,7 +93,9 @@ describe('picking and moving', () => {
   })
 
   it('lets go of the selection by a click beside everything, or by Escape', () => {
-    const hand = atTheTable('pick', { traces: uprightBands(50) }).click([50, 25]).click([300, 300])
+    const hand = atTheTable('pick', { traces: uprightBands(50) })
+      .click([50, 25])
+      .click([300, 300])
     expect(hand.table.selection).toBeNull()
     expect(hand.click([50, 25]).escape().table.selection).toBeNull()
   })
@@ -96,6 +108,12 @@ describe('picking and moving', () => {
     ]
     const leaveOuts = [{ id: 'slot', shape: { kind: 'polygon' as const, points }, copies: null }]
     const hand = atTheTable('pick', { leaveOuts }).click([60, 10]).drag([100, 0], [120, -5])
-    expect(hand.marks.leaveOuts[0].shape).toMatchObject({ points: [[0, 0], [120, -5], [100, 100]] })
+    expect(hand.marks.leaveOuts[0].shape).toMatchObject({
+      points: [
+        [0, 0],
+        [120, -5],
+        [100, 100],
+      ],
+    })
   })
 })

@@ -123,7 +123,9 @@ describe('copies round a centre', () => {
   const outline = { kind: 'circle', cx: 200, cy: 150, r: 100 } as const
 
   it('spreads a chosen leave-out round the face by Enter', () => {
-    const hand = atTheTable('copies', { outline, leaveOuts: [slot] }).click([262, 150]).enter()
+    const hand = atTheTable('copies', { outline, leaveOuts: [slot] })
+      .click([262, 150])
+      .enter()
     const [leaveOut] = hand.marks.leaveOuts
     expect(leaveOut.copies).toEqual({ count: 6, cx: 200, cy: 150 })
     const opposite = copiesOf(leaveOut)[3]
@@ -131,12 +133,16 @@ describe('copies round a centre', () => {
   })
 
   it('takes the face’s centre exactly when the click is near it', () => {
-    const hand = atTheTable('copies', { outline, leaveOuts: [slot] }).click([262, 150]).click([207, 145])
+    const hand = atTheTable('copies', { outline, leaveOuts: [slot] })
+      .click([262, 150])
+      .click([207, 145])
     expect(hand.marks.leaveOuts[0].copies).toEqual({ count: 6, cx: 200, cy: 150 })
   })
 
   it('takes the click itself where no centre is near', () => {
-    const hand = atTheTable('copies', { outline, leaveOuts: [slot] }).click([262, 150]).click([20, 30])
+    const hand = atTheTable('copies', { outline, leaveOuts: [slot] })
+      .click([262, 150])
+      .click([20, 30])
     expect(hand.marks.leaveOuts[0].copies).toEqual({ count: 6, cx: 20, cy: 30 })
   })
 })
