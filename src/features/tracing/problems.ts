@@ -32,6 +32,11 @@ export function findProblems(marks: Marks): Problem[] {
   ]
 }
 
+/** As it stands on the photograph: a band without a number carries a question mark there. */
+function numberOf({ order }: Trace): number | string {
+  return order ?? '?'
+}
+
 function withoutNumber(trace: Trace): Problem {
   return { code: 'noNumber', params: {}, place: middleOfPath(trace.points), traceIds: [trace.id] }
 }
@@ -46,7 +51,7 @@ function bandsThatCross(traces: readonly Trace[]): Problem[] {
       const sameBand = traces[a].order !== null && traces[a].order === traces[b].order
       const place = sameBand ? null : meetingPlace(traces[a].points, traces[b].points)
       if (place) {
-        const params = { first: traces[a].order ?? '–', second: traces[b].order ?? '–' }
+        const params = { first: numberOf(traces[a]), second: numberOf(traces[b]) }
         found.push({ code: 'bandsCross', params, place, traceIds: [traces[a].id, traces[b].id] })
       }
     }
@@ -125,13 +130,13 @@ function neighbouringBands(traces: readonly Trace[], leaveOuts: readonly Shape[]
   )
 }
 
-const samplesPerBand = 5
+/** Shares of a band's length at which its neighbours are looked for, its middle first: that is where it is told. */
+const sampleShares = [0.5, 0.3, 0.7, 0.1, 0.9]
 
 function samplesOf(points: readonly PointPx[]): { place: PointPx; normal: PointPx }[] {
   const segments = points.length - 1
-  const count = Math.min(samplesPerBand, segments)
-  return Array.from({ length: count }, (_, k) => {
-    const i = Math.min(segments - 1, Math.floor(((k + 0.5) * segments) / count))
+  const indices = new Set(sampleShares.map((share) => Math.floor(share * segments)))
+  return [...indices].map((i) => {
     const [a, b] = [points[i], points[i + 1]]
     const length = distance(a, b) || 1
     return { place: between(a, b, 0.5), normal: [-(b[1] - a[1]) / length, (b[0] - a[0]) / length] }
@@ -178,17 +183,23 @@ function median(values: readonly number[]): number | null {
 /** Clicks farther off than a hand's tremble. */
 const tremblePx = 6
 
-function outsideFace({ id, points }: Trace, outline: Shape | null): Problem[] {
+function outsideFace(trace: Trace, outline: Shape | null): Problem[] {
   if (!outline) return []
-  const place = points.find(([x, y]) => !isInside(outline, x, y) && rimDistance(outline, [x, y]) > tremblePx)
-  return place ? [{ code: 'outsideFace', params: {}, place, traceIds: [id] }] : []
+  const place = trace.points.find(
+    ([x, y]) => !isInside(outline, x, y) && rimDistance(outline, [x, y]) > tremblePx,
+  )
+  return place ? [atTrace('outsideFace', trace, place)] : []
 }
 
-function insideLeaveOut({ id, points }: Trace, shapes: readonly Shape[]): Problem[] {
-  const place = points.find(([x, y]) =>
+function insideLeaveOut(trace: Trace, shapes: readonly Shape[]): Problem[] {
+  const place = trace.points.find(([x, y]) =>
     shapes.some((shape) => isInside(shape, x, y) && rimDistance(shape, [x, y]) > tremblePx),
   )
-  return place ? [{ code: 'insideLeaveOut', params: {}, place, traceIds: [id] }] : []
+  return place ? [atTrace('insideLeaveOut', trace, place)] : []
+}
+
+function atTrace(code: Problem['code'], trace: Trace, place: PointPx): Problem {
+  return { code, params: { order: numberOf(trace) }, place, traceIds: [trace.id] }
 }
 
 function rimDistance(shape: Shape, place: PointPx): number {

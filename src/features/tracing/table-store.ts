@@ -35,8 +35,9 @@ function isLooking(state: TableState, event: TableEvent): boolean {
   if (looksOnly.includes(event.type)) return true
   if (event.type === 'chooseTool') return event.tool === 'pick' || event.tool === 'profile'
   if (event.type === 'pointerDown') return state.tool.tool === 'profile' || !event.shift
-  const pointer = event.type === 'pointerMove' || event.type === 'pointerUp'
-  return pointer && (state.tool.tool === 'profile' || state.tool.phase === 'idle')
+  if (event.type === 'pointerUp') return true
+  // What is pressed may not be dragged; where the pointer is may be shown.
+  return event.type === 'pointerMove' && (state.tool.tool === 'profile' || state.tool.phase === 'idle')
 }
 
 /** Not crypto.randomUUID, which browsers give only on encrypted pages. */

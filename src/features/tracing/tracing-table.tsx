@@ -21,7 +21,7 @@ export function TracingTable({ reading, equipment }: Props) {
   const circumstances = useMemo(() => circumstancesOf(reading, equipment), [reading, equipment])
   const [opened] = useState(() => openTable(reading, circumstances?.setUp.viewingAngleDeg ?? 0))
   useEffect(() => {
-    if (opened.isRestored) toast(t('restored'))
+    if (opened.isRestored) toast(t('restored'), { id: 'restored' })
   }, [opened, t])
   return (
     <TableProvider value={opened.store}>

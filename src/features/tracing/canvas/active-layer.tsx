@@ -1,12 +1,11 @@
 import { memo, useCallback } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Layer } from 'react-konva'
-import { middleOfPath } from '../geometry/paths'
 import { marksOf } from '../table-state'
 import { useTable, useTableStore } from '../table-store'
 import { drawGesture, drawSelected } from './draw-gesture'
 import { Painted } from './painted'
-import { drawChip, type Pen } from './pen'
+import type { Pen } from './pen'
 import type { View } from './use-viewport'
 
 /** What is in the hand: the selected mark with its handles, and what the tool has set so far. */
@@ -21,13 +20,7 @@ export const ActiveLayer = memo(function ActiveLayer({ view }: { view: View }) {
 
   const drawHeld = useCallback(
     (pen: Pen) => {
-      if (!selection) return
-      drawSelected(pen, marks, selection, press)
-      const trace = selection.kind === 'trace' && marks.traces.find(({ id }) => id === selection.id)
-      if (trace && trace.order !== null) {
-        const text = String(trace.order).replace('-', '\u2212')
-        drawChip(pen, { text, place: middleOfPath(trace.points), isSelected: true })
-      }
+      if (selection) drawSelected(pen, marks, selection, press)
     },
     [marks, selection, press],
   )

@@ -171,18 +171,37 @@ export function drawProfileLine(pen: Pen, from: PointPx, to: PointPx): void {
 /** Nearer than this on screen chips crowd, and only first, last, fives and selected are shown. */
 const crowdedPx = 22
 
-/** A chip for each numbered band on its middle: on the longest of its pieces, or on all of them. */
-export function drawNumbers(pen: Pen, traces: readonly Trace[], onAllPieces: boolean): void {
+interface NumbersShown {
+  onAllPieces: boolean
+  selectedId: string | null
+}
+
+/** A chip for each numbered band on its middle: on the longest of its pieces, or on all of them; always on the selected. */
+export function drawNumbers(
+  pen: Pen,
+  traces: readonly Trace[],
+  { onAllPieces, selectedId }: NumbersShown,
+): void {
+  const selected = traces.find(({ id, order }) => id === selectedId && order !== null)
   const numbered = onAllPieces ? traces.filter(({ order }) => order !== null) : longestPieces(traces)
   const places = numbered.map(({ points }) => middleOfPath(points))
   const orders = numbered.map(({ order }) => order ?? 0)
   const isCrowded = nearestPx(places, pen.viewport.scale) < crowdedPx
   const [least, most] = [Math.min(...orders), Math.max(...orders)]
-  numbered.forEach(({ order }, i) => {
+  numbered.forEach(({ id, order }, i) => {
     const n = order ?? 0
+    if (id === selectedId || (!onAllPieces && n === selected?.order)) return
     if (isCrowded && n !== least && n !== most && !isRoundBetween(n, least, most)) return
-    drawChip(pen, { text: String(n).replace('-', '\u2212'), place: places[i] })
+    drawChip(pen, { text: signed(n), place: places[i] })
   })
+  if (selected) {
+    const text = signed(selected.order ?? 0)
+    drawChip(pen, { text, place: middleOfPath(selected.points), isSelected: true })
+  }
+}
+
+function signed(n: number): string {
+  return String(n).replace('-', '\u2212')
 }
 
 /** Fives, but not those that would lie on the first or the last. */

@@ -4,7 +4,6 @@ import { memo, useCallback, useMemo, useRef } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Layer } from 'react-konva'
 import { edgeBandPaths } from '../geometry/edge-band-paths'
-import type { Problem } from '../problems'
 import { marksOf } from '../table-state'
 import { useTable } from '../table-store'
 import type { Selection } from '../tools/tool'
@@ -12,29 +11,25 @@ import {
   drawDatum,
   drawEdgeBand,
   drawLeaveOut,
-  drawNumbers,
   drawOutline,
   drawPressArrow,
-  drawProblem,
   drawStraightedge,
   drawTrace,
 } from './draw-marks'
 import { Painted } from './painted'
-import { drawChip, type Pen } from './pen'
+import type { Pen } from './pen'
 import type { View } from './use-viewport'
 
 interface Props {
   view: View
   frame: PartFrame | null
-  problems: readonly Problem[]
 }
 
 /** Everything that isn't in the hand. Dragging one band leaves this layer as it is. */
-export const MarksLayer = memo(function MarksLayer({ view, frame, problems }: Props) {
+export const MarksLayer = memo(function MarksLayer({ view, frame }: Props) {
   const { t } = useTranslation('table')
   const marks = useTable(marksOf)
   const selection = useTable((table) => table.selection)
-  const isNumbering = useTable((table) => table.tool.tool === 'number')
   const still = useStill(marks, selection)
   const { outline, leaveOuts, edgeBandMm } = marks
   const edgePaths = useMemo(
@@ -55,21 +50,10 @@ export const MarksLayer = memo(function MarksLayer({ view, frame, problems }: Pr
     [still, press],
   )
   const drawEdge = useCallback((pen: Pen) => drawEdgeBand(pen, edgePaths), [edgePaths])
-  const drawNotes = useCallback(
-    (pen: Pen) => {
-      drawNumbers(pen, still.traces, isNumbering)
-      for (const { place, code } of problems) {
-        if (code === 'noNumber') drawChip(pen, { text: '?', place, attention: true })
-        else drawProblem(pen, place)
-      }
-    },
-    [still, problems, isNumbering],
-  )
   return (
     <Layer listening={false}>
       <Painted viewport={view.viewport} draw={drawEdge} />
       <Painted viewport={view.viewport} draw={drawStill} />
-      <Painted viewport={view.viewport} draw={drawNotes} />
     </Layer>
   )
 })

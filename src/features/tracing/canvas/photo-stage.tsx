@@ -8,6 +8,7 @@ import { useTable } from '../table-store'
 import { ActiveLayer } from './active-layer'
 import { Magnifier } from './magnifier'
 import { MarksLayer } from './marks-layer'
+import { NotesLayer } from './notes-layer'
 import { usePhoto } from './use-photo'
 import type { View } from './use-viewport'
 
@@ -47,8 +48,9 @@ export function PhotoStage({ areaRef, photo, view, frame, problems, showMarks, i
         {area.width > 0 && (
           <Stage width={area.width} height={area.height} listening={false}>
             <PhotoLayer image={image} photo={photo} view={view} />
-            {isMarked && showMarks && <MarksLayer view={view} frame={frame} problems={problems} />}
+            {isMarked && showMarks && <MarksLayer view={view} frame={frame} />}
             {isMarked && <ActiveLayer view={view} />}
+            {isMarked && showMarks && <NotesLayer view={view} problems={problems} />}
           </Stage>
         )}
       </div>

@@ -1,6 +1,9 @@
 import { type RefObject, useCallback, useEffect, useRef, useState } from 'react'
 import { fitBox, fitPhoto, type Size, type Viewport } from '../viewport'
 
+/** The font of number chips, as `pen.ts` sets it. */
+const canvasFont = '600 12px "Source Sans 3"'
+
 export interface View {
   viewport: Viewport
   area: Size
@@ -54,6 +57,11 @@ export function useViewport(
     if (!photo || area.width === 0 || isMoved.current) return
     put(openingBox.current ? fitBox(openingBox.current, area) : fitPhoto(photo, area))
   }, [photo, area, put])
+
+  useEffect(() => {
+    // A canvas takes whatever font is there when it is drawn, so it is drawn again once ours is.
+    void document.fonts.load(canvasFont).then(() => put({ ...latest.current }))
+  }, [put])
 
   return { viewport, area, change, latest, fitAll }
 }

@@ -31,7 +31,10 @@ export function FigureHead({ figure, reading, isCurrent, isFinal }: Props) {
       </p>
       <div
         data-current={isCurrent}
-        className={classNames('mt-1 flex items-end justify-between', !isCurrent && 'opacity-45')}
+        className={classNames(
+          'mt-1 flex items-end justify-between transition-opacity delay-150',
+          !isCurrent && 'opacity-45',
+        )}
       >
         <p data-testid="flatness" className="whitespace-nowrap text-result-tablet desk:text-result">
           {shown.value} <span className="text-muted text-[1.25rem] font-light">{shown.unit}</span>

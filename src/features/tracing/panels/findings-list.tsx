@@ -18,6 +18,9 @@ interface Line {
   traceIds: readonly string[]
 }
 
+/** A face full of mistakes is told by its first few. */
+const mostLines = 6
+
 /** Mistakes and remarks, each with the way to its place. */
 export function FindingsList({ read, onShow }: Props) {
   const { t } = useTranslation('table')
@@ -27,10 +30,13 @@ export function FindingsList({ read, onShow }: Props) {
       <h2 className="pb-1 font-semibold text-muted text-second">{t('result.findings')}</h2>
       {lines.length === 0 && <p className="text-muted text-second">{t('result.nothing')}</p>}
       <ul className="flex flex-col gap-1.5 text-second">
-        {lines.map((line) => (
+        {lines.slice(0, mostLines).map((line) => (
           <FindingLine key={line.key} line={line} onShow={onShow} />
         ))}
       </ul>
+      {lines.length > mostLines && (
+        <p className="pt-1 text-muted text-second">{t('result.more', { count: lines.length - mostLines })}</p>
+      )}
     </section>
   )
 }

@@ -31,10 +31,12 @@ export const ResultColumn = memo(function ResultColumn(props: Props) {
   const figure = living.read?.figure ?? null
   // What needs a person stands above the map, that there is nothing to report below it.
   const isFirst = living.read !== null && hasFindings(living.read)
-  const faded = !living.isCurrent && 'opacity-45'
+  const faded = classNames('transition-opacity delay-150', !living.isCurrent && 'opacity-45')
   return (
     <section
       aria-label={t('result.label')}
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: it scrolls, and a keyboard scrolls only what takes the focus
+      tabIndex={0}
       className={classNames(
         'min-h-0 min-w-0 overflow-y-auto px-5 pt-2.5 pb-5',
         isWide ? 'grid grid-cols-2 gap-x-9 px-6 pt-4' : 'border-hairline border-l',
@@ -47,7 +49,7 @@ export const ResultColumn = memo(function ResultColumn(props: Props) {
           <NoFigure hasLight={bandUm !== null} />
         )}
         {figure && (
-          <div className={classNames(faded)}>
+          <div className={faded}>
             <FormWords figure={figure} />
           </div>
         )}
@@ -56,7 +58,7 @@ export const ResultColumn = memo(function ResultColumn(props: Props) {
       </Stack>
       <Stack isSecond={!isWide}>
         {figure && (
-          <div className={classNames(faded)}>
+          <div className={faded}>
             <FigureMap figure={figure} line={line} sizePx={isWide ? 172 : 134} />
           </div>
         )}

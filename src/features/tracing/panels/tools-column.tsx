@@ -21,12 +21,12 @@ export function ToolsColumn({ mayEdit, showMarks, onShowMarks, options, bands }:
   const { t } = useTranslation('table')
   return (
     <div className="flex min-h-0 flex-col overflow-y-auto border-hairline border-r pt-3 pb-2">
-      <div role="toolbar" aria-label={t('tools.label')} aria-orientation="vertical">
+      <section aria-label={t('tools.label')}>
         <Heading>{t('tools.mark')}</Heading>
         {toolNames.map((tool) => (
           <ToolLine key={tool} tool={tool} disabled={!mayEdit && !forAll.includes(tool)} />
         ))}
-      </div>
+      </section>
       <Heading className="mt-4">{t('tools.show')}</Heading>
       <MarksSwitch isOn={showMarks} onToggle={onShowMarks} />
       {options}

@@ -29,11 +29,7 @@ export function ToolsRow({ mayEdit, showMarks, onShowMarks }: Props) {
   const [isOpen, setOpen] = useState(false)
   const isLocked = (tool: ToolName) => !mayEdit && !forAll.includes(tool)
   return (
-    <div
-      role="toolbar"
-      aria-label={t('tools.label')}
-      className="flex overflow-x-auto border-hairline border-y"
-    >
+    <section aria-label={t('tools.label')} className="flex overflow-x-auto border-hairline border-y">
       {shown.map((tool) => (
         <ToolCell key={tool} tool={tool} disabled={isLocked(tool)} />
       ))}
@@ -62,6 +58,6 @@ export function ToolsRow({ mayEdit, showMarks, onShowMarks }: Props) {
           </button>
         </Popover.Content>
       </Popover.Root>
-    </div>
+    </section>
   )
 }

@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'react'
+import { useEffect, useMemo, useRef, useState } from 'react'
 import { marksOf } from '../table-state'
 import type { TableStore } from '../table-store'
 import { useTable } from '../table-store'
@@ -33,8 +33,7 @@ export function useLivingResult(store: TableStore, circumstances: Circumstances)
     return store.subscribe(ask)
   }, [store, circumstances])
 
-  return {
-    read: latest?.read ?? null,
-    isCurrent: latest !== null && latest.marks === marks && latest.circumstances === circumstances,
-  }
+  const read = latest?.read ?? null
+  const isCurrent = latest !== null && latest.marks === marks && latest.circumstances === circumstances
+  return useMemo(() => ({ read, isCurrent }), [read, isCurrent])
 }

@@ -27,16 +27,25 @@ export interface Saving {
   keepMine: () => void
 }
 
-/** Last saves of tables that were left. */
-const leaving = new Map<string, Promise<unknown>>()
+/** Last saves of tables that were left, begun once it is sure that the page is gone. */
+const leaving = new Map<string, { timer: ReturnType<typeof setTimeout>; through: Promise<unknown> }>()
 
-function remember(readingId: string, lastSave: Promise<unknown>): void {
-  leaving.set(readingId, lastSave)
+function leave(readingId: string, lastSave: () => Promise<unknown>): void {
+  let timer: ReturnType<typeof setTimeout> | undefined
+  const through = new Promise((resolve) => {
+    timer = setTimeout(() => resolve(lastSave()), 0)
+  })
+  if (timer) leaving.set(readingId, { timer, through })
+}
+
+function stay(readingId: string): void {
+  clearTimeout(leaving.get(readingId)?.timer)
+  leaving.delete(readingId)
 }
 
 /** Resolves once the last save of an earlier visit is through, so that a new one starts from what it saved. */
 export async function whenLastSaveIsThrough(readingId: string): Promise<void> {
-  await leaving.get(readingId)
+  await leaving.get(readingId)?.through
   leaving.delete(readingId)
 }
 
@@ -51,13 +60,15 @@ export function useAutosave(
   )
   const [conflict, setConflict] = useState<Conflict | null>(overtaken && { ...overtaken, theirs: null })
   const autosave = useRef<Autosave | null>(null)
+  const seen = useRef(reading.marks)
   const halted = useRef(conflict !== null)
   halted.current = conflict !== null
 
   useEffect(() => {
     if (!reading.mayEdit) return
-    let last = reading.marks
-    const saving = startAutosave({
+    stay(reading.id)
+    // Kept when the page is put up a second time in a row, as React does while developing.
+    autosave.current ??= startAutosave({
       version: reading.marksVersion,
       send: (save) => sendMarks(reading.id, save),
       copyHere: copyInBrowser(reading.id),
@@ -69,28 +80,27 @@ export function useAutosave(
         setConflict({ stale: next.stale, mine: marksToKeep(store.get()), theirs: null })
       },
     })
-    autosave.current = saving
+    const saving = autosave.current
     const look = () => {
       const marks = marksToKeep(store.get())
-      if (marks === last) return
-      last = marks
+      if (marks === seen.current) return
+      seen.current = marks
       if (!halted.current) saving.changed(marks)
     }
     look()
     const unsubscribe = store.subscribe(look)
-    const leave = () => {
+    const whenHidden = () => {
       if (document.visibilityState !== 'hidden') return
       store.dispatch({ type: 'settle' })
       void saving.flush()
     }
-    document.addEventListener('visibilitychange', leave)
+    document.addEventListener('visibilitychange', whenHidden)
     return () => {
       store.dispatch({ type: 'settle' })
       unsubscribe()
-      document.removeEventListener('visibilitychange', leave)
-      remember(reading.id, saving.flush().finally(saving.stop))
+      document.removeEventListener('visibilitychange', whenHidden)
+      leave(reading.id, () => saving.flush().finally(saving.stop))
     }
-    // The reading as it was opened: later versions come through the saves themselves.
   }, [store, reading])
 
   const flush = useCallback(async () => {
