@@ -44,7 +44,7 @@ export const demoParts: DemoPart[] = [
       edgeBandMm: 0.5,
     }),
     lot: 'L-2611',
-    serials: ['SR-40-101', 'SR-40-102', 'SR-40-103'],
+    serials: ['SR-40-101', 'SR-40-102', 'SR-40-103', 'SR-40-104', 'SR-40-105'],
   },
   {
     customer: 'Ostrey Valves',
@@ -63,7 +63,7 @@ export const demoParts: DemoPart[] = [
       rule: guarded,
     }),
     lot: 'L-2608',
-    serials: ['VP-43-007', 'VP-43-008', 'VP-43-009'],
+    serials: ['VP-43-007', 'VP-43-008', 'VP-43-009', 'VP-43-010'],
   },
   {
     customer: 'Dunmarrow Pumps',
@@ -79,7 +79,7 @@ export const demoParts: DemoPart[] = [
       edgeBandMm: 0.5,
     }),
     lot: 'L-2602',
-    serials: ['GB-35-1', 'GB-35-2'],
+    serials: ['GB-35-1', 'GB-35-2', 'GB-35-3'],
   },
   {
     customer: 'Ostrey Valves',
@@ -93,7 +93,7 @@ export const demoParts: DemoPart[] = [
       tolerance: upTo(0.5893, '2 bands'),
     }),
     lot: 'L-2615',
-    serials: ['LD-60-21', 'LD-60-22'],
+    serials: ['LD-60-21', 'LD-60-22', 'LD-60-23'],
   },
   {
     customer: 'Dunmarrow Pumps',
@@ -108,6 +108,6 @@ export const demoParts: DemoPart[] = [
       support: 'held',
     }),
     lot: 'L-2613',
-    serials: ['VC-60-0312', 'VC-60-0313'],
+    serials: ['VC-60-0312', 'VC-60-0313', 'VC-60-0314'],
   },
 ]

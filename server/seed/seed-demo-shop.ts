@@ -9,32 +9,49 @@ import { addPart } from '../use-cases/parts/add-part'
 import { addPerson } from '../use-cases/people/add-person'
 import { addPiece } from '../use-cases/pieces/add-piece'
 import { changeSettings } from '../use-cases/settings/change-settings'
+import { createDemoClock } from './demo-clock'
 import { demoEquipment } from './demo-equipment'
 import { type DemoPart, demoCustomers, demoParts } from './demo-parts'
 import { demoSignIns } from './demo-people'
+import { type DemoShop, seedReadings } from './seed-readings'
 
-/** The demo shop: people, customers, parts, pieces and equipment, all by way of the use-cases. */
-export async function seedDemoShop(context: AppContext): Promise<void> {
+const openedDaysAgo = 21
+
+/** The demo shop: people, customers, parts, pieces, equipment and readings, by way of the use-cases. */
+export async function seedDemoShop(live: AppContext): Promise<void> {
+  const clock = createDemoClock(live.now())
+  const context: AppContext = { ...live, now: clock.now }
+  clock.moveTo(openedDaysAgo, '07:30')
   changeSettings(context, null, { shopName: 'Quillmere Lapping Works' })
-  const actor = await seedPeople(context)
-  for (const item of demoEquipment) addEquipment(context, actor, item)
+  const people = await seedPeople(context)
+  // The first of them enters the rest.
+  const [actor] = people
+  const equipment = demoEquipment.map((item) => addEquipment(context, actor, item))
   const customers = demoCustomers.map((customer) => addCustomer(context, actor, customer))
-  for (const part of demoParts) seedPart(context, actor, customers, part)
+  const pieces = demoParts.flatMap((part) => seedPart(context, actor, customers, part))
+  await seedReadings(context, clock, { people, equipment, pieces })
 }
 
-/** Gives the first of them, who enters the rest. */
-async function seedPeople(context: AppContext): Promise<Actor> {
-  const added = []
+async function seedPeople(context: AppContext): Promise<Actor[]> {
+  const added: Actor[] = []
   for (const person of demoSignIns) added.push(await addPerson(context, null, person))
-  return added[0]
+  return added
 }
 
-function seedPart(context: AppContext, actor: Actor, customers: readonly Customer[], demo: DemoPart): void {
+function seedPart(
+  context: AppContext,
+  actor: Actor,
+  customers: readonly Customer[],
+  demo: DemoPart,
+): DemoShop['pieces'] {
   const { face, lot, serials, customer: name, ...columns } = demo
   const customer = customers.find((candidate) => candidate.name === name)
   if (!customer) throw new Error(`The demo part ${demo.number} names no customer of the demo shop.`)
   const part = addPart(context, actor, { ...columns, customerId: customer.id })
-  addFace(context, actor, part.id, face)
+  const { id: faceId } = addFace(context, actor, part.id, face)
   const { id: lotId } = addLot(context, actor, { partId: part.id, number: lot, order: '' })
-  for (const serial of serials) addPiece(context, actor, { partId: part.id, lotId, serial })
+  return serials.map((serial) => ({
+    ...addPiece(context, actor, { partId: part.id, lotId, serial }),
+    faceId,
+  }))
 }

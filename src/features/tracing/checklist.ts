@@ -139,7 +139,8 @@ function resultStep(t: TFunction<'table'>, facts: ChecklistFacts): ChecklistStep
   if (!hasLight) return { ...open('checklist.resultNoLight'), state: 'attention' }
   if (!marks.outline || marks.traces.length === 0) return open('checklist.resultNone')
   if (!living.isCurrent) return open('checklist.resultWorking')
-  if (figureWords === null) return open('checklist.resultRefused')
+  if (figureWords === null)
+    return { ...open('checklist.resultRefused'), shortWords: t('checklist.resultRefusedShort') }
   const key = isFinal ? 'resultFinal' : marks.pressArrow ? 'resultFigure' : 'resultUnsigned'
   return {
     name: 'result',

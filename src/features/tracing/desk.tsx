@@ -17,7 +17,7 @@ import { ChecklistBar } from './panels/checklist-bar'
 import { ConflictView } from './panels/conflict-view'
 import { PhotoChoice } from './panels/photo-choice'
 import { ResultColumn } from './panels/result-column'
-import { StatusLine } from './panels/status-line'
+import { StatusLine, WhatNext } from './panels/status-line'
 import { ToolOptions } from './panels/tool-options'
 import { ToolsColumn } from './panels/tools-column'
 import { ToolsRow } from './panels/tools-row'
@@ -68,6 +68,12 @@ export function Desk({ reading, circumstances, setUpWords, overtaken }: Props) {
     >
       <PhotoChoice photos={reading.photos} shownId={photo.shown?.id ?? null} onShow={photo.show} />
       <ViewButtons view={desk.view} />
+      {!isDesk && (
+        <WhatNext
+          notice={notice}
+          className="pointer-events-none absolute bottom-3 left-3 max-w-[58%] rounded bg-ground/85 px-3 py-1.5 text-second"
+        />
+      )}
       <ConflictView saving={saving} />
     </PhotoStage>
   )
@@ -97,12 +103,14 @@ export function Desk({ reading, circumstances, setUpWords, overtaken }: Props) {
         )}
         <div className="flex min-h-0 min-w-0 flex-col">
           <div className="h-[620px] max-h-[70dvh] desk:h-auto desk:max-h-none desk:flex-1">{stage}</div>
-          <StatusLine
-            frame={result.frame}
-            spacingPx={medianSpacingPx(result.figure)}
-            scale={desk.view.viewport.scale}
-            notice={notice}
-          />
+          {isDesk && (
+            <StatusLine
+              frame={result.frame}
+              spacingPx={medianSpacingPx(result.figure)}
+              scale={desk.view.viewport.scale}
+              notice={notice}
+            />
+          )}
           {!isDesk && <ToolsRow mayEdit={mayEdit} showMarks={showMarks} onShowMarks={toggleMarks} />}
           {!isDesk && <ToolOptions template={template} inRow />}
         </div>

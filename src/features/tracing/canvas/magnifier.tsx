@@ -2,11 +2,13 @@ import type { Photo } from '@shared/schemas/readings'
 import type { PointPx } from '@shared/schemas/shapes'
 import { useEffect, useRef } from 'react'
 import { useTranslation } from 'react-i18next'
+import { handlesOf } from '../geometry/handles'
 import { marksOf, type TableState } from '../table-state'
 import { useTable, useTableStore } from '../table-store'
 import { type Size, toScreen } from '../viewport'
 import { drawGesture, drawSelected } from './draw-gesture'
 import { drawTrace } from './draw-marks'
+import { chooseQuarter, glassMiddle, type Quarter } from './glass-place'
 import { acrossBands, lightAcross, patchOf } from './light-across'
 import type { View } from './use-viewport'
 
@@ -63,7 +65,7 @@ function Glass({ image, photo, view, place }: Props & { place: PointPx }) {
     drawGlass(glass, image, photo, place, times * scale, store.get(), across)
   }, [image, photo, place, scale, store, tool])
 
-  const at = glassPlace(toScreen(view.viewport, { x: place[0], y: place[1] }), view.area)
+  const at = useGlassPlace(view, place, store.get())
   return (
     <div
       aria-hidden="true"
@@ -84,17 +86,20 @@ function Glass({ image, photo, view, place }: Props & { place: PointPx }) {
   )
 }
 
-/** In the quarter opposite the hand, and within the area. */
-function glassPlace(pointer: { x: number; y: number }, area: Size) {
-  const aside = radiusPx + 34
-  const below = radiusPx + stripPx.height
-  const toRight = pointer.x < area.width / 2
-  const x = pointer.x + (toRight ? aside : -aside)
-  const y = pointer.y + (pointer.y < area.height / 2 ? aside * 0.8 : -aside - 24)
-  return {
-    x: Math.min(area.width - radiusPx - 12, Math.max(radiusPx + 12, x)),
-    y: Math.min(area.height - below - 16, Math.max(radiusPx + 12, y)),
-  }
+const glassSize = { radiusPx, belowPx: stripPx.height + 6 }
+
+/** The middle of the glass: clear of the hand and of what is being drawn. */
+function useGlassPlace({ viewport, area }: View, [x, y]: PointPx, table: TableState) {
+  const before = useRef<Quarter | null>(null)
+  const pointer = toScreen(viewport, { x, y })
+  const drawn = placesDrawn(table).map(([px, py]) => toScreen(viewport, { x: px, y: py }))
+  before.current = chooseQuarter(pointer, drawn, glassSize, area, before.current)
+  return glassMiddle(pointer, before.current, glassSize, area)
+}
+
+function placesDrawn({ tool, selection, ...table }: TableState): readonly PointPx[] {
+  if ('points' in tool) return tool.points
+  return selection ? handlesOf(table.history.present, selection) : []
 }
 
 function prepare(canvas: HTMLCanvasElement | null, { width, height }: Size): CanvasRenderingContext2D | null {

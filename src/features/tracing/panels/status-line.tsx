@@ -18,14 +18,9 @@ interface Props {
 /** What to do next; where the pointer is; how coarse the picture is. */
 export function StatusLine({ frame, spacingPx, scale, notice }: Props) {
   const { t } = useTranslation('table')
-  const tool = useTable((table) => table.tool)
-  const options = useTable((table) => table.options)
-  const selection = useTable((table) => table.selection)
   return (
-    <footer className="flex h-[30px] items-center gap-7 border-hairline border-t px-4 text-second max-desk:hidden">
-      <p id="table-what-next" className="min-w-0 flex-1 truncate">
-        {notice ?? whatNext(t, tool, options, selection)}
-      </p>
+    <footer className="flex h-[30px] items-center gap-7 border-hairline border-t px-4 text-second">
+      <WhatNext notice={notice} className="min-w-0 flex-1 truncate" />
       <PointerPlace frame={frame} />
       {spacingPx !== null && (
         <span className="whitespace-nowrap text-muted">
@@ -36,6 +31,24 @@ export function StatusLine({ frame, spacingPx, scale, notice }: Props) {
         {t('status.zoom', { percent: Math.round(scale * 100) })}
       </span>
     </footer>
+  )
+}
+
+interface WhatNextProps {
+  notice: string | null
+  className: string
+}
+
+/** One sentence on what to do next with the tool in hand. */
+export function WhatNext({ notice, className }: WhatNextProps) {
+  const { t } = useTranslation('table')
+  const tool = useTable((table) => table.tool)
+  const options = useTable((table) => table.options)
+  const selection = useTable((table) => table.selection)
+  return (
+    <p id="table-what-next" className={className}>
+      {notice ?? whatNext(t, tool, options, selection)}
+    </p>
   )
 }
 

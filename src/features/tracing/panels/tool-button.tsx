@@ -35,7 +35,7 @@ export function ToolLine({ tool, disabled }: Props) {
 }
 
 /** The same as a cell of the row under the photograph, wide enough for a finger. */
-export function ToolCell({ tool, disabled }: Props) {
+export function ToolCell({ tool, disabled, className }: Props & { className?: string }) {
   const { t, i18n } = useTranslation('table')
   const { isActive, choose } = useTool(tool)
   const short = `tools.short.${tool}`
@@ -46,8 +46,9 @@ export function ToolCell({ tool, disabled }: Props) {
       disabled={disabled}
       onClick={choose}
       className={classNames(
-        'h-14 min-w-[64px] flex-1 whitespace-nowrap border-hairline border-r px-3.5 text-body last:border-r-0 disabled:opacity-45',
+        'h-14 min-w-[64px] flex-auto whitespace-nowrap border-hairline border-r px-3 text-body disabled:opacity-45',
         isActive && 'bg-tool-active font-semibold shadow-[inset_0_-2px_0_var(--iris)]',
+        className,
       )}
     >
       {t(i18n.exists(`table:${short}`) ? short : `tools.${tool}`)}

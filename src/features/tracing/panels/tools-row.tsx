@@ -34,7 +34,7 @@ export function ToolsRow({ mayEdit, showMarks, onShowMarks }: Props) {
         <ToolCell key={tool} tool={tool} disabled={isLocked(tool)} />
       ))}
       <Popover.Root open={isOpen} onOpenChange={setOpen}>
-        <Popover.Trigger className="h-14 min-w-[64px] flex-1 px-3.5 text-body">
+        <Popover.Trigger className="h-14 min-w-[64px] flex-auto px-3 text-body">
           {t('tools.more')}
         </Popover.Trigger>
         <Popover.Content
@@ -45,14 +45,19 @@ export function ToolsRow({ mayEdit, showMarks, onShowMarks }: Props) {
           onClick={() => setOpen(false)}
         >
           {more.map((tool) => (
-            <ToolCell key={tool} tool={tool} disabled={isLocked(tool)} />
+            <ToolCell
+              key={tool}
+              tool={tool}
+              disabled={isLocked(tool)}
+              className="flex-none border-r-0 text-left"
+            />
           ))}
           <button
             type="button"
             role="switch"
             aria-checked={showMarks}
             onClick={onShowMarks}
-            className="h-14 text-body"
+            className="h-14 px-3 text-left text-body"
           >
             {t('tools.marks')} {showMarks ? '✓' : ''}
           </button>
