@@ -13,5 +13,8 @@ export default defineConfig({
   test: {
     include: ['{shared,server,src,tests}/**/*.test.{ts,tsx}'],
     exclude: ['node_modules/**', 'tests/e2e/**'],
+    // No test is about speed: a busy machine may take its time.
+    testTimeout: 120_000,
+    hookTimeout: 180_000,
   },
 })

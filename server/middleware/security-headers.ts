@@ -24,7 +24,8 @@ export function securityHeaders(env: Pick<Env, 'tls' | 'nodeEnv'>): RequestHandl
         connectSrc: developing ? ["'self'", 'ws:'] : ["'self'"],
       },
     },
-    strictTransportSecurity: env.tls === 'off' ? false : { maxAge: 180 * 24 * 3600, includeSubDomains: false },
+    strictTransportSecurity:
+      env.tls === 'off' ? false : { maxAge: 180 * 24 * 3600, includeSubDomains: false },
     referrerPolicy: { policy: 'same-origin' },
   })
 }

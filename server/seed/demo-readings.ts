@@ -47,7 +47,7 @@ export const demoReadings: DemoReading[] = [
     daysAgo: 12,
     time: '09:05',
     progress: agreed,
-    note: 'As it came from the lathe bench, before lapping.',
+    note: 'As received, before lapping.',
     soakMinutes: 60,
     seed: 31,
     lamp: 'helium',

@@ -40,13 +40,14 @@ async function signIn(on: Page, email: string, password: string): Promise<void> 
   await on.getByRole('link', { name: /Lapwing/ }).waitFor()
 }
 
+interface Answer {
+  status: number
+  // biome-ignore lint/suspicious/noExplicitAny: whatever the server sends, asked field by field
+  json: any
+}
+
 /** Sends JSON as the page itself would, with its cookie and origin. */
-async function call(
-  on: Page,
-  method: string,
-  path: string,
-  body?: unknown,
-): Promise<{ status: number; json: any }> {
+async function call(on: Page, method: string, path: string, body?: unknown): Promise<Answer> {
   return on.evaluate(
     async ({ method, path, body }) => {
       const response = await fetch(`/api${path}`, {
@@ -102,7 +103,10 @@ describe('an evening at the bench', () => {
     await page.getByRole('option', { name: 'TR-30' }).click()
     await page.getByLabel('Serial number').fill('0001')
     await page.getByRole('button', { name: 'Add the piece' }).click()
-    await page.getByText(/TR-30.* · 0001/).first().waitFor()
+    await page
+      .getByText(/TR-30.* · 0001/)
+      .first()
+      .waitFor()
     await page.getByRole('combobox', { name: 'Light source' }).click()
     await page
       .getByRole('option', { name: /sodium/i })
@@ -171,7 +175,7 @@ describe('an evening at the bench', () => {
   })
 
   it('undo takes back one mark and redo brings it again', async () => {
-    const bands = () => page.locator('[data-step="bands"]').innerText()
+    const bands = () => page.locator('[data-step="bands"]').textContent()
     const before = await bands()
     await page.getByRole('application').focus()
     await page.keyboard.press('Control+z')

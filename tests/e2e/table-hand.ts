@@ -19,7 +19,11 @@ export class TableHand {
   }
 
   async take(tool: string): Promise<void> {
-    await this.page.getByRole('toolbar').getByRole('button', { name: new RegExp(`^${tool}\\b`) }).first().click()
+    await this.page
+      .getByRole('toolbar')
+      .getByRole('button', { name: new RegExp(`^${tool}\\b`) })
+      .first()
+      .click()
   }
 
   async click(place: PlacePx): Promise<void> {
