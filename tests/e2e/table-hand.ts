@@ -19,11 +19,7 @@ export class TableHand {
   }
 
   async take(tool: string): Promise<void> {
-    await this.page
-      .getByRole('toolbar')
-      .getByRole('button', { name: new RegExp(`^${tool}\\b`) })
-      .first()
-      .click()
+    await this.page.getByRole('button', { name: tool, exact: true }).first().click()
   }
 
   async click(place: PlacePx): Promise<void> {

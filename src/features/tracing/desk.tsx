@@ -1,4 +1,4 @@
-import type { Reading } from '@shared/schemas/readings'
+import type { Photo, Reading } from '@shared/schemas/readings'
 import type { Figure } from '@shared/schemas/results'
 import type { PointPx } from '@shared/schemas/shapes'
 import { isEditable } from '@shared/workflow/reading-states'
@@ -49,7 +49,7 @@ export function Desk({ reading, circumstances, setUpWords, overtaken }: Props) {
   useComputeOnLeaving(reading, saving.flush, result.figure !== null, send.isSuccess)
   const toggleMarks = useCallback(() => setShowMarks((isOn) => !isOn), [])
   const photo = usePhotoChoice(reading)
-  const desk = useDeskView(reading, photo.shown, toggleMarks)
+  const desk = useDeskView(reading, photo.shown, photo.isMarked, toggleMarks)
   const { mayEdit } = reading
   const { t } = useTranslation('table')
   const why = t(isEditable(reading.state) ? 'next.notYours' : 'next.leftDraft')
@@ -140,20 +140,26 @@ const noProblems: readonly never[] = []
 /** The photograph of the bands is the one that is marked; others are looked at. */
 function usePhotoChoice({ photos }: Reading) {
   const marked = photos.find(({ role }) => role === 'bands') ?? null
-  const [shownId, show] = useState(marked?.id ?? photos[0]?.id ?? null)
+  const store = useTableStore()
+  const [shownId, setShownId] = useState(marked?.id ?? photos[0]?.id ?? null)
+  const show = (id: string) => {
+    // Nothing out of sight stays in the hand.
+    store.dispatch({ type: 'select', selection: null })
+    setShownId(id)
+  }
   const shown = photos.find(({ id }) => id === shownId) ?? null
   return { shown, show, isMarked: shown !== null && shown === marked }
 }
 
 /** The view of the photograph, and the hands on it. */
-function useDeskView(reading: Reading, photo: Reading['photos'][number] | null, toggleMarks: () => void) {
+function useDeskView(reading: Reading, photo: Photo | null, isMarked: boolean, toggleMarks: () => void) {
   const store = useTableStore()
   const areaRef = useRef<HTMLDivElement>(null)
   const isPanning = useRef(false)
   const size = useMemo(() => photo && { width: photo.widthPx, height: photo.heightPx }, [photo])
   const view = useViewport(areaRef, size, faceBox(reading))
   const { change, latest, area, fitAll } = view
-  useTablePointer({ areaRef, store, viewport: latest, changeView: change, isPanning })
+  useTablePointer({ areaRef, store, viewport: latest, changeView: change, isPanning, isMarked })
   useTableKeys({
     store,
     areaRef,

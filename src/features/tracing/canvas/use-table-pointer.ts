@@ -16,10 +16,12 @@ interface Parts {
   changeView: ChangeView
   /** Space held: the pointer pans. */
   isPanning: RefObject<boolean>
+  /** False for a photograph that is only looked at: there the pointer always pans. */
+  isMarked: boolean
 }
 
 /** Pointer, pen and fingers on the photograph: tools with one, panning with space or the middle button, two fingers zoom. */
-export function useTablePointer({ areaRef, store, viewport, changeView, isPanning }: Parts): void {
+export function useTablePointer({ areaRef, store, viewport, changeView, isPanning, isMarked }: Parts): void {
   const fingers = useRef(new Map<number, Finger>())
 
   useEffect(() => {
@@ -51,7 +53,7 @@ export function useTablePointer({ areaRef, store, viewport, changeView, isPannin
       }
       if (fingers.current.size > 2) return
       area.setPointerCapture(event.pointerId)
-      if (event.button === 1 || isPanning.current) {
+      if (event.button === 1 || isPanning.current || !isMarked) {
         event.preventDefault()
         panFrom = placeOf(event)
         return
@@ -77,7 +79,7 @@ export function useTablePointer({ areaRef, store, viewport, changeView, isPannin
         changeView((view) => pan(view, to.x - from.x, to.y - from.y))
         return
       }
-      store.dispatch({ type: 'pointerMove', ...at(event) })
+      if (isMarked) store.dispatch({ type: 'pointerMove', ...at(event) })
     }
     const onUp = (event: PointerEvent) => {
       fingers.current.delete(event.pointerId)
@@ -93,7 +95,9 @@ export function useTablePointer({ areaRef, store, viewport, changeView, isPannin
       if (toolPointer === event.pointerId) store.dispatch({ type: 'cancel' })
       toolPointer = null
     }
-    const onDoubleClick = (event: MouseEvent) => store.dispatch({ type: 'doubleClick', ...at(event) })
+    const onDoubleClick = (event: MouseEvent) => {
+      if (isMarked) store.dispatch({ type: 'doubleClick', ...at(event) })
+    }
     const onLeave = () => toolPointer === null && store.dispatch({ type: 'pointerLeave' })
     const onWheel = (event: WheelEvent) => {
       event.preventDefault()
@@ -122,5 +126,5 @@ export function useTablePointer({ areaRef, store, viewport, changeView, isPannin
       area.removeEventListener('wheel', onWheel)
       area.removeEventListener('contextmenu', noMenu)
     }
-  }, [areaRef, store, viewport, changeView, isPanning])
+  }, [areaRef, store, viewport, changeView, isPanning, isMarked])
 }

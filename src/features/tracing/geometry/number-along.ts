@@ -3,7 +3,7 @@ import type { PointPx } from '@shared/schemas/shapes'
 import { type Crossing, firstCrossing, segmentsMeet } from './paths'
 
 /** The traces that a drag crosses, each once, in the order in which it meets them. */
-export function tracesAlong(traces: readonly Trace[], path: readonly PointPx[]): Trace[] {
+function tracesAlong(traces: readonly Trace[], path: readonly PointPx[]): Trace[] {
   return traces
     .map((trace) => ({ trace, crossing: firstCrossing(path, trace.points) }))
     .filter((met): met is { trace: Trace; crossing: Crossing } => met.crossing !== null)

@@ -38,7 +38,7 @@ export function ToolsColumn({ mayEdit, showMarks, onShowMarks, options, bands }:
   )
 }
 
-export function Heading({ children, className }: { children: ReactNode; className?: string }) {
+function Heading({ children, className }: { children: ReactNode; className?: string }) {
   return (
     <h2 className={classNames('px-4 pb-1 font-semibold text-muted text-second', className)}>{children}</h2>
   )

@@ -31,7 +31,7 @@ export function usualFaceWay(size: FaceSizes, viewingAngleDeg: number): FaceWay 
 export const clicksNeeded: Record<FaceWay, number> = { circle: 3, ellipse: 5, corners: 4, polygon: 3 }
 
 /** The outline through the clicks, or null as long as they don't give one. */
-export function outlineThrough(way: FaceWay, points: readonly PointPx[]): Outline | null {
+function outlineThrough(way: FaceWay, points: readonly PointPx[]): Outline | null {
   if (points.length < clicksNeeded[way]) return null
   switch (way) {
     case 'circle':
