@@ -27,7 +27,9 @@ export function HeightScale({ range, unit: wanted, bandUm, heightPx = 120 }: Pro
   const most = fromUm(range.mostUm, unit, bandUm)
   const yOf = (value: number) => topPx + ((most - value) / (most - least)) * heightPx
   const ticks = scaleTicks(least, most)
-  const decimals = ticks.length > 1 ? decimalsOf(Math.abs(ticks[1] - ticks[0])) : 1
+  // The plane's tick is left out, so two neighbours may stand two steps apart: the least distance is the step.
+  const steps = ticks.slice(1).map((value, i) => value - ticks[i])
+  const decimals = steps.length > 0 ? decimalsOf(Math.min(...steps)) : 1
   const unitWord = t(`common:unitWord.${unit}`)
   return (
     <svg
