@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { applyHomography, homographyFromFourPoints, invertHomography, type Place } from './homography'
+import type { Place } from './homography'
 import { type PartFrame, partFrame } from './part-frame'
 
 const photo = { widthPx: 1600, heightPx: 1200 }
@@ -127,44 +127,150 @@ describe('the part frame', () => {
       ]),
     ).toHaveProperty('problem')
   })
-})
 
-describe('homographies', () => {
-  const from: Place[] = [
-    [0, 0],
-    [10, 1],
-    [9, 8],
-    [-1, 7],
-  ]
-  const to: Place[] = [
-    [0, 0],
-    [1, 0],
-    [1, 1],
-    [0, 1],
-  ]
-
-  it('take four places to four others, and their inverses back', () => {
-    const h = homographyFromFourPoints(from, to)!
-    const back = invertHomography(h)!
-    from.forEach(([x, y], i) => {
-      const [u, v] = applyHomography(h, x, y)
-      expect(u).toBeCloseTo(to[i]![0], 9)
-      expect(v).toBeCloseTo(to[i]![1], 9)
-      expect(applyHomography(back, u, v)[0]).toBeCloseTo(x, 9)
-    })
+  // Derived here: the same pinhole camera turned about its axis, so that the tilt axis lies anywhere.
+  it.each([
+    [25, 35],
+    [-25, 35],
+    [40, -70],
+    [32, 120],
+    [-32, 90],
+  ])('of a disc tilted %s° about an axis %s° from the photo’s x undoes the camera', (angleDeg, turnDeg) => {
+    const radius = 20
+    const upright = pinhole(angleDeg, 240, 24)
+    const turn = (turnDeg * Math.PI) / 180
+    const turned = ([x, y]: Place): Place => [
+      799.5 + (x - 799.5) * Math.cos(turn) - (y - 599.5) * Math.sin(turn),
+      599.5 + (x - 799.5) * Math.sin(turn) + (y - 599.5) * Math.cos(turn),
+    ]
+    const rim = rimEllipse(upright, radius)
+    const [cx, cy] = turned([rim.cx, rim.cy])
+    const f = frame(
+      { ...rim, cx, cy, rotationDeg: turnDeg },
+      { kind: 'round', diameterMm: 2 * radius },
+      { ...squareOn, viewingAngleDeg: Math.abs(angleDeg) },
+    )
+    // The part's own axes are the photograph's: turn the disc's places along with the camera.
+    for (const [u, v] of [
+      [0, 0],
+      [15, 0],
+      [0, 15],
+      [0, -15],
+      [-9, 11],
+    ] as const) {
+      const x = u * Math.cos(turn) - v * Math.sin(turn)
+      const y = u * Math.sin(turn) + v * Math.cos(turn)
+      const [xMm, yMm] = f.toMm(...turned(upright(u, v)))
+      expect(Math.hypot(xMm - x, yMm - y)).toBeLessThan(1e-3 * radius)
+    }
   })
 
-  it('are not to be had from three places on a line', () => {
-    expect(
-      homographyFromFourPoints(
-        [
-          [0, 0],
-          [1, 1],
-          [2, 2],
-          [0, 5],
+  it('has its perspective the other way where the photo’s middle lies on the other side of the ellipse', () => {
+    const ellipse = { kind: 'ellipse', cx: 800, cy: 600, rx: 480, ry: 418, rotationDeg: 0 } as const
+    const size = { kind: 'round', diameterMm: 40 } as const
+    const middleOf = (heightPx: number) =>
+      frame(ellipse, size, { viewingAngleDeg: 30, photo: { widthPx: 1601, heightPx }, mirrored: false }).toPx(
+        0,
+        0,
+      )[1]
+    // The photo's middle 20 px below the ellipse's centre, then 20 px above it.
+    const [below, above] = [middleOf(1241), middleOf(1161)]
+    expect(below - 600).toBeCloseTo(600 - above, 9)
+    expect(Math.abs(below - 600)).toBeGreaterThan(1)
+    // The far side is foreshortened, so that the disc's own centre lies farther off on the far (middle) side.
+    expect(below).toBeGreaterThan(600)
+  })
+
+  it('leaves the perspective out without the photo’s size, and where the ratio asks for a camera too near', () => {
+    const size = { kind: 'round', diameterMm: 40 } as const
+    const centre = (ry: number, photo: typeof squareOn.photo | null) =>
+      frame({ kind: 'ellipse', cx: 800, cy: 500, rx: 480, ry, rotationDeg: 0 }, size, {
+        viewingAngleDeg: 30,
+        photo,
+        mirrored: false,
+      }).toPx(0, 0)[1]
+    expect(centre(418, null)).toBeCloseTo(500, 9)
+    expect(centre(470, photo)).toBeCloseTo(500, 9)
+    expect(centre(418, photo)).not.toBeCloseTo(500, 0)
+  })
+
+  it('of a block takes all four corners, whichever way they wind, and keeps x right and y down', () => {
+    const corners: [number, number][] = [
+      [110, 470],
+      [1460, 380],
+      [1490, 730],
+      [130, 820],
+    ]
+    const block = { kind: 'block', widthMm: 35, heightMm: 9 } as const
+    const windings: [number, number][][] = [
+      corners,
+      [corners[1]!, corners[0]!, corners[3]!, corners[2]!],
+      [corners[2]!, corners[3]!, corners[0]!, corners[1]!],
+      [corners[3]!, corners[2]!, corners[1]!, corners[0]!],
+    ]
+    const wanted = [
+      [-17.5, -4.5],
+      [17.5, -4.5],
+      [17.5, 4.5],
+      [-17.5, 4.5],
+    ]
+    for (const points of windings) {
+      const f = frame({ kind: 'polygon', points }, block, squareOn)
+      corners.forEach(([x, y], i) => {
+        const [xMm, yMm] = f.toMm(x, y)
+        expect(xMm).toBeCloseTo(wanted[i]![0]!, 9)
+        expect(yMm).toBeCloseTo(wanted[i]![1]!, 9)
+      })
+    }
+  })
+
+  it('of a free outline has its scale from the longest side', () => {
+    const f = frame(
+      {
+        kind: 'polygon',
+        points: [
+          [100, 100],
+          [500, 100],
+          [500, 300],
         ],
-        to,
+      },
+      { kind: 'free', longestSideMm: Math.hypot(40, 20) },
+      squareOn,
+    )
+    expect(f.mmPerPx(300, 200)).toBeCloseTo(0.1, 9)
+    const [x, y] = f.toMm(500, 300)
+    expect([x, y]).toEqual([expect.closeTo(13.3333, 4), expect.closeTo(13.3333, 4)])
+  })
+
+  it('is refused for an ellipse without width and an outline without length', () => {
+    const size = { kind: 'round', diameterMm: 40 } as const
+    expect(
+      partFrame({ kind: 'ellipse', cx: 0, cy: 0, rx: 400, ry: 0.1, rotationDeg: 0 }, size, squareOn),
+    ).toEqual({ problem: 'flat' })
+    expect(
+      partFrame(
+        {
+          kind: 'polygon',
+          points: [
+            [5, 5],
+            [5, 5],
+            [5, 5],
+          ],
+        },
+        { kind: 'free', longestSideMm: 4 },
+        squareOn,
       ),
-    ).toBeNull()
+    ).toEqual({ problem: 'flat' })
+  })
+
+  it('has the local scale that its own map has, by the area of a small square', () => {
+    const f = frame(
+      { kind: 'ellipse', cx: 790, cy: 500, rx: 490, ry: 430, rotationDeg: 30 },
+      { kind: 'round', diameterMm: 40 },
+      { ...squareOn, viewingAngleDeg: 30 },
+    )
+    const [a, b, c] = [f.toMm(600, 650), f.toMm(600.01, 650), f.toMm(600, 650.01)]
+    const area = Math.abs((b[0] - a[0]) * (c[1] - a[1]) - (b[1] - a[1]) * (c[0] - a[0]))
+    expect(f.mmPerPx(600, 650)).toBeCloseTo(Math.sqrt(area) / 0.01, 5)
   })
 })

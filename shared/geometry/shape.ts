@@ -62,7 +62,7 @@ export function circleThroughThreePoints(a: PointPx, b: PointPx, c: PointPx): Ci
 }
 
 /**
- * The circle that fits three or more rim places best: algebraic start (Kåsa), then Gauss and Newton on the
+ * The circle that fits three or more rim places best: a start through three of them, then Gauss and Newton on the
  * distances themselves. Null for fewer than three places, or places on a line.
  */
 export function circleThroughPoints(points: readonly PointPx[]): Circle | null {

@@ -84,4 +84,61 @@ describe('the expanded uncertainty', () => {
       'support',
     ])
   })
+
+  it('lists nothing once all is stated, and only what is missing', () => {
+    const all: SetUp = {
+      ...bareSetUp,
+      wavelengthRelativeU: 0.001,
+      viewingAngleUDeg: 1,
+      edgePlacementUMm: 0.05,
+      referenceFlatFormUm: 0.03,
+      temperatureHalfWidthUm: 0.01,
+      repeats: { standardDeviationUm: 0.02, count: 5 },
+      nearCamera: { meanGapUm: 10, distanceMm: 400 },
+      supportHalfWidthUm: 0.01,
+    }
+    expect(notStatedIn(drawUpBudget(subject, all))).toEqual([])
+    expect(notStatedIn(drawUpBudget(subject, { ...all, repeats: null }))).toEqual(['repeat'])
+    for (const row of drawUpBudget(subject, bareSetUp))
+      if (!row.stated)
+        expect(row).toMatchObject({ contributionUm: 0, estimate: null, standardUncertainty: null })
+  })
+
+  // Band-reading budget, derived here by the GUM's root sum of squares: reading ± 0.1 band 0.01696, flat λ/20 at
+  // 632.8 nm 0.01827, temperature ± 9.3 nm 0.00537, repeats of 20 nm, n = 5, 0.00894; uc 0.02702, U 0.0540 µm.
+  it('of a reading to a tenth of a helium band is 0.054 µm', () => {
+    const rows = drawUpBudget(
+      {
+        ...subject,
+        bandUm: 0.2937809,
+        surface: { centreLine: 0.1 / Math.sqrt(3), betweenBands: 0, bias: 0 },
+      },
+      {
+        ...bareSetUp,
+        referenceFlatFormUm: 0.03164,
+        temperatureHalfWidthUm: 0.0093,
+        repeats: { standardDeviationUm: 0.02, count: 5 },
+      },
+    )
+    const of = (source: BudgetSource) => rows.find((r) => r.source === source)?.contributionUm
+    expect(of('centreLine')).toBeCloseTo(0.01696, 5)
+    expect(of('referenceFlat')).toBeCloseTo(0.01827, 5)
+    expect(of('temperature')).toBeCloseTo(0.00537, 5)
+    expect(of('repeat')).toBeCloseTo(0.00894, 5)
+    expect(expandedUncertaintyUm(rows) / 2).toBeCloseTo(0.02702, 5)
+    expect(expandedUncertaintyUm(rows)).toBeCloseTo(0.054, 4)
+  })
+
+  it('every stated row is its sensitivity times its standard uncertainty', () => {
+    const rows = drawUpBudget(subject, {
+      ...bareSetUp,
+      wavelengthRelativeU: 0.001,
+      viewingAngleDeg: 20,
+      viewingAngleUDeg: 1,
+      edgePlacementUMm: 0.05,
+      nearCamera: { meanGapUm: 10, distanceMm: 400 },
+    })
+    for (const row of rows.filter((r) => r.stated))
+      expect(row.sensitivity! * row.standardUncertainty!).toBeCloseTo(row.contributionUm, 12)
+  })
 })

@@ -1,5 +1,6 @@
 import type { PartFrame } from '../geometry/part-frame'
 import type { Shape } from '../schemas/shapes'
+import { acrossMmOf } from './face-basis'
 import {
   connectedParts,
   forEachRimPixel,
@@ -10,7 +11,7 @@ import {
   spansHold,
   spansLess,
 } from './row-spans'
-import type { FaceSize, TracedReading } from './types'
+import type { TracedReading } from './types'
 
 type Places = readonly (readonly [number, number])[]
 
@@ -66,18 +67,7 @@ function insetOutlineMm(
       edgeBandMm,
     )
   }
-  return circleCorners(0, 0, roundRadiusMm(size) - edgeBandMm)
-}
-
-function roundRadiusMm(size: FaceSize): number {
-  switch (size.kind) {
-    case 'round':
-      return size.diameterMm / 2
-    case 'free':
-      return size.longestSideMm / 2
-    case 'block':
-      return Math.min(size.widthMm, size.heightMm) / 2
-  }
+  return circleCorners(0, 0, acrossMmOf({ size }) / 2 - edgeBandMm)
 }
 
 function circleCorners(cx: number, cy: number, radius: number): Places {
@@ -113,16 +103,15 @@ function roundCorners(shape: Exclude<Shape, { kind: 'polygon' }>): Places {
   })
 }
 
-/** The polygon with every side moved inwards by a distance (outwards when negative), corners mitred. */
+/**
+ * The polygon with every side moved inwards by a distance (outwards when negative), corners mitred; no corners when
+ * nothing is left of it.
+ */
 export function insetPolygon(corners: Places, distance: number): Places {
   if (distance === 0) return corners
   const n = corners.length
-  let signedArea = 0
-  for (let i = 0, j = n - 1; i < n; j = i++) {
-    signedArea += corners[j]![0] * corners[i]![1] - corners[i]![0] * corners[j]![1]
-  }
-  const inward = Math.sign(signedArea) || 1
-  return corners.map((corner, i) => {
+  const inward = Math.sign(signedArea(corners)) || 1
+  const inset = corners.map((corner, i) => {
     const [ax, ay] = unit(corners[(i + n - 1) % n]!, corner)
     const [bx, by] = unit(corner, corners[(i + 1) % n]!)
     // Sum of the two unit normals, scaled so that its part along either normal is the distance.
@@ -131,6 +120,26 @@ export function insetPolygon(corners: Places, distance: number): Places {
     const scale = distance / Math.max(0.1, 1 + ax * bx + ay * by)
     return [corner[0] + nx * scale, corner[1] + ny * scale] as const
   })
+  return isTurnedInsideOut(corners, inset) ? [] : inset
+}
+
+/** Sides moved past one another: the winding turns over, or every side runs the other way. */
+function isTurnedInsideOut(before: Places, after: Places): boolean {
+  if (signedArea(before) * signedArea(after) <= 0) return true
+  return before.every((corner, i) => {
+    const k = (i + 1) % before.length
+    const [ax, ay] = unit(corner, before[k]!)
+    const [bx, by] = unit(after[i]!, after[k]!)
+    return ax * bx + ay * by < 0
+  })
+}
+
+function signedArea(corners: Places): number {
+  let doubled = 0
+  for (let i = 0, j = corners.length - 1; i < corners.length; j = i++) {
+    doubled += corners[j]![0] * corners[i]![1] - corners[i]![0] * corners[j]![1]
+  }
+  return doubled / 2
 }
 
 function unit(from: readonly [number, number], to: readonly [number, number]): readonly [number, number] {

@@ -1,4 +1,5 @@
 import type { PartFrame } from '../geometry/part-frame'
+import { acrossMmOf } from './face-basis'
 import type { MeasuredPlaces } from './measured-area'
 import { gapAt, type SurfaceFit } from './surface-fit'
 import type { TracedReading } from './types'
@@ -11,9 +12,9 @@ export function rimDistancesMm(
   frame: PartFrame,
   places: MeasuredPlaces,
 ): Float64Array {
-  const { outline, size } = reading
+  const { outline } = reading
   if (outline.kind !== 'polygon') {
-    const radius = size.kind === 'round' ? size.diameterMm / 2 : Number.NaN
+    const radius = acrossMmOf(reading) / 2
     return places.xMm.map((x, i) => radius - Math.hypot(x, places.yMm[i]!))
   }
   const corners = outline.points.map(([x, y]) => frame.toMm(x, y))

@@ -10,7 +10,7 @@ export interface RowSpans {
   readonly rows: readonly (readonly number[])[]
 }
 
-/** Pixels whose centres lie inside the closed polygon (even-odd), limited to rows 0 … heightPx − 1 when given. */
+/** Pixels whose centres lie inside the closed polygon (even-odd). */
 export function polygonSpans(points: readonly (readonly [number, number])[]): RowSpans {
   let top = Number.POSITIVE_INFINITY
   let bottom = Number.NEGATIVE_INFINITY

@@ -22,11 +22,11 @@ const umPer: Record<Exclude<HeightUnit, 'bands'>, number> = {
   um: 1,
   nm: 1e-3,
   mm: 1e3,
-  uin: UM_PER_INCH * 1e-6,
-  millionths: UM_PER_INCH * 1e-6,
+  uin: UM_PER_INCH / 1e6,
+  millionths: UM_PER_INCH / 1e6,
   in: UM_PER_INCH,
-  thou: UM_PER_INCH * 1e-3,
-  tenths: UM_PER_INCH * 1e-4,
+  thou: UM_PER_INCH / 1e3,
+  tenths: UM_PER_INCH / 1e4,
 }
 
 /** Every way of writing a unit that people use, lower case. */
