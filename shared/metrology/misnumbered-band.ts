@@ -1,7 +1,7 @@
 import { designMatrix } from './design-matrix'
 import { solveLeastSquares } from './least-squares'
 import type { SurfaceBasis } from './surface-basis'
-import type { SurfaceFit, TracedPoints } from './surface-fit'
+import { pickClicks, type SurfaceFit, type TracedPoints } from './surface-fit'
 
 /** A band that lies farther than this from a simple surface through the others may carry a wrong number. */
 const SUSPECT_BANDS = 0.4
@@ -90,16 +90,5 @@ function simpleDepartures(points: TracedPoints, basis: SurfaceBasis): Float64Arr
 function clicksWithout(points: TracedPoints, trace: number): TracedPoints {
   const kept: number[] = []
   for (let i = 0; i < points.count; i++) if (points.traceOf[i] !== trace) kept.push(i)
-  const of = (values: Float64Array) => Float64Array.from(kept, (i) => values[i]!)
-  return {
-    count: kept.length,
-    xMm: of(points.xMm),
-    yMm: of(points.yMm),
-    xMmRight: of(points.xMmRight),
-    yMmRight: of(points.yMmRight),
-    xMmDown: of(points.xMmDown),
-    yMmDown: of(points.yMmDown),
-    order: of(points.order),
-    traceOf: Int32Array.from(kept, (i) => points.traceOf[i]!),
-  }
+  return pickClicks(points, kept)
 }

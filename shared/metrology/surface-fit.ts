@@ -96,10 +96,17 @@ export function gapAt(fit: SurfaceFit, xMm: number, yMm: number): number {
 
 /** Every so-manieth click, `count` in all. */
 function thinned(points: TracedPoints, count: number): TracedPoints {
-  const pick = Int32Array.from({ length: count }, (_, i) => Math.floor((i * points.count) / count))
-  const of = (values: Float64Array) => Float64Array.from(pick, (i) => values[i]!)
+  return pickClicks(
+    points,
+    Int32Array.from({ length: count }, (_, i) => Math.floor((i * points.count) / count)),
+  )
+}
+
+/** The named clicks only, in the order named. */
+export function pickClicks(points: TracedPoints, picked: ArrayLike<number>): TracedPoints {
+  const of = (values: Float64Array) => Float64Array.from(picked, (i) => values[i]!)
   return {
-    count,
+    count: picked.length,
     xMm: of(points.xMm),
     yMm: of(points.yMm),
     xMmRight: of(points.xMmRight),
@@ -107,7 +114,7 @@ function thinned(points: TracedPoints, count: number): TracedPoints {
     xMmDown: of(points.xMmDown),
     yMmDown: of(points.yMmDown),
     order: of(points.order),
-    traceOf: Int32Array.from(pick, (i) => points.traceOf[i]!),
+    traceOf: Int32Array.from(picked, (i) => points.traceOf[i]!),
   }
 }
 
