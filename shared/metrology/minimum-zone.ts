@@ -59,10 +59,10 @@ export function createMinimumZoneSolver(xs: ArrayLike<number>, ys: ArrayLike<num
         exactV,
       )!
       for (let i = 0; i < count; i++) rest[i] = zs[i]! - near.a * exactU[i]! - near.b * exactV[i]! - near.c
-      const starts = [...(start && start.length === 4 ? [start] : []), spread, highsAndLows(rest, u, v)]
+      const starts = [() => start ?? [], () => spread, () => highsAndLows(rest, u, v)]
       let best: MinimumZone | null = null
       for (const first of starts) {
-        const reference = level(first, u, v, rest)
+        const reference = level(first(), u, v, rest)
         if (!reference) continue
         const found = ascend(reference, u, v, exactU, exactV, rest, cx, cy, extent)
         if (!best || found.width < best.width) best = found

@@ -1,7 +1,7 @@
 import { designMatrix } from './design-matrix'
 import { solveLeastSquares } from './least-squares'
 import type { SurfaceBasis } from './surface-basis'
-import { pickClicks, type SurfaceFit, type TracedPoints } from './surface-fit'
+import { pickClicks, type SurfaceFit, type TracedPoints, thinned } from './surface-fit'
 
 /** A band that lies farther than this from a simple surface through the others may carry a wrong number. */
 const SUSPECT_BANDS = 0.4
@@ -12,6 +12,8 @@ const LESS_BENT = 0.6
 /** The simple surface: degree 4, fitted by least absolute departures, which one wrong band can't bend. */
 const SIMPLE_FUNCTIONS = 15
 const PASSES = 12
+/** Clicks that settle so simple a surface. */
+const SIMPLE_CLICKS = 800
 const LEAST_DEPARTURE_BANDS = 0.02
 
 /**
@@ -27,7 +29,7 @@ export function misnumberedTrace(
   refit: (points: TracedPoints) => SurfaceFit | null,
   gapAtClick: (fit: SurfaceFit, click: number) => number,
 ): number | null {
-  const suspect = farthestFromSimple(points, fit.basis)
+  const suspect = farthestFromSimple(thinned(points, SIMPLE_CLICKS), fit.basis)
   if (suspect === null) return null
   const others = clicksWithout(points, suspect)
   const without = refit(others)

@@ -55,9 +55,9 @@ const LEAST_CLICK_NOISE_PX = 0.05
 const USUAL_CLICK_NOISE_PX = 0.5
 const USUAL_NOISE_WORTH = 8
 const REWEIGHTINGS = 8
-const EVIDENCE_STEPS = 12
+const EVIDENCE_STEPS = 8
 /** The evidence has settled when no component that matters changes its deviation by more than this share. */
-const SETTLED_SHARE = 0.02
+const SETTLED_SHARE = 0.05
 /** Prior deviation that every shrunk component starts from, bands: a loose start invents form where there are no bands. */
 const STARTING_SD_BANDS = 0.02
 /** The free functions are as good as unbounded, bands. */
@@ -81,8 +81,14 @@ export function fitSurface(points: TracedPoints, basis: SurfaceBasis): SurfaceFi
   if (points.count <= ENOUGH_TO_CHOOSE) return refine(new Fitting(points, basis, everything, scales))
   // Few clicks choose the functions as well as many; only those chosen are then fitted to all clicks.
   const chosen = refine(new Fitting(thinned(points, ENOUGH_TO_CHOOSE), basis, everything, scales))
-  const start = chosen.componentSd.map((sd) => sd * sd)
-  return refine(new Fitting(points, basis, chosen.active, start))
+  const fit = new Fitting(
+    points,
+    basis,
+    chosen.active,
+    chosen.componentSd.map((sd) => sd * sd),
+  )
+  fit.beginFrom(chosen.coefficients)
+  return refine(fit)
 }
 
 /** The fitted gap at a place of the part frame, bands. */
@@ -94,8 +100,9 @@ export function gapAt(fit: SurfaceFit, xMm: number, yMm: number): number {
   return gap
 }
 
-/** Every so-manieth click, `count` in all. */
-function thinned(points: TracedPoints, count: number): TracedPoints {
+/** Every so-manieth click, `count` in all; all of them where they are fewer. */
+export function thinned(points: TracedPoints, count: number): TracedPoints {
+  if (points.count <= count) return points
   return pickClicks(
     points,
     Int32Array.from({ length: count }, (_, i) => Math.floor((i * points.count) / count)),
@@ -120,13 +127,18 @@ export function pickClicks(points: TracedPoints, picked: ArrayLike<number>): Tra
 
 function refine(fit: Fitting): SurfaceFit {
   let iterations = 0
+  let seeing = 0
   let converged = false
   while (iterations < REWEIGHTINGS && !converged) {
     const before = fit.noise
-    const settled = fit.settleEvidence(iterations === 0 ? 3 : EVIDENCE_STEPS)
+    const isBlind = !fit.knowsSlopes
+    const settled = fit.settleEvidence(isBlind ? 3 : EVIDENCE_STEPS)
     fit.reweigh()
     iterations++
-    converged = settled && iterations >= 3 && Math.abs(fit.noise - before) < 0.005 * fit.noise
+    // The weights that came of a blind pass are no test of convergence, nor are those that came of the next.
+    if (!isBlind) seeing++
+    const enough = seeing >= (fit.beganFromFit ? 1 : 2)
+    converged = settled && enough && Math.abs(fit.noise - before) < 0.005 * fit.noise
     if (!converged) fit.leaveOutNegligible()
   }
   fit.settleEvidence(1)
@@ -139,6 +151,7 @@ class Fitting {
   noise = 0.1
   /** Whether weights and noise are in px yet; at first they are in bands. */
   private inPixels = false
+  beganFromFit = false
   private readonly count: number
   private active: Int32Array
   private design: Float64Array
@@ -183,6 +196,18 @@ class Fitting {
     this.moment = new Float64Array(terms)
     this.coefficients = new Float64Array(terms)
     this.priorVariance = new Float64Array(terms)
+  }
+
+  get knowsSlopes(): boolean {
+    return this.inPixels
+  }
+
+  /** Takes slopes, weights and noise from a surface that was fitted to some of the clicks. */
+  beginFrom(coefficients: Float64Array): void {
+    this.coefficients.set(coefficients)
+    this.effectiveTerms = 0
+    this.reweigh()
+    this.beganFromFit = true
   }
 
   /** Re-estimates the components' variances with the weights as they are; true when they have settled. */
