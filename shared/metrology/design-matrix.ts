@@ -43,6 +43,40 @@ export function rowDot(matrix: Float64Array, vector: Float64Array, columns: numb
   return sum
 }
 
+/** Product of a row-major matrix with a vector, one value a row; four rows at a time, so that sums don't wait for one another. */
+export function linearCombination(
+  matrix: Float64Array,
+  vector: Float64Array,
+  columns: number,
+  rows: number,
+): Float64Array {
+  const out = new Float64Array(rows)
+  const end = rows - (rows % 4)
+  for (let i = 0; i < end; i += 4) {
+    const r0 = i * columns
+    const r1 = r0 + columns
+    const r2 = r1 + columns
+    const r3 = r2 + columns
+    let s0 = 0
+    let s1 = 0
+    let s2 = 0
+    let s3 = 0
+    for (let a = 0; a < columns; a++) {
+      const v = vector[a]!
+      s0 += matrix[r0 + a]! * v
+      s1 += matrix[r1 + a]! * v
+      s2 += matrix[r2 + a]! * v
+      s3 += matrix[r3 + a]! * v
+    }
+    out[i] = s0
+    out[i + 1] = s1
+    out[i + 2] = s2
+    out[i + 3] = s3
+  }
+  for (let i = end; i < rows; i++) out[i] = rowDot(matrix, vector, columns, i)
+  return out
+}
+
 /**
  * Gram matrix (lower triangle, into `gram`) and moments (into `moment`) of weighted rows, four rows at a time
  * to spare memory traffic.
@@ -64,6 +98,10 @@ export function accumulateNormalEquations(
     const r1 = r0 + terms
     const r2 = r1 + terms
     const r3 = r2 + terms
+    const y0 = observed[i]!
+    const y1 = observed[i + 1]!
+    const y2 = observed[i + 2]!
+    const y3 = observed[i + 3]!
     for (let a = 0; a < terms; a += 2) {
       // Two functions at a time, so that every value read serves twice; the last of an odd count goes alone.
       const pair = a + 1 < terms ? 1 : 0
@@ -75,7 +113,6 @@ export function accumulateNormalEquations(
       const g1 = pair * design[r1 + a + pair]! * rowWeight[i + 1]!
       const g2 = pair * design[r2 + a + pair]! * rowWeight[i + 2]!
       const g3 = pair * design[r3 + a + pair]! * rowWeight[i + 3]!
-      const [y0, y1, y2, y3] = [observed[i]!, observed[i + 1]!, observed[i + 2]!, observed[i + 3]!]
       moment[a] = moment[a]! + f0 * y0 + f1 * y1 + f2 * y2 + f3 * y3
       if (pair) moment[a + 1] = moment[a + 1]! + g0 * y0 + g1 * y1 + g2 * y2 + g3 * y3
       const row = a * terms

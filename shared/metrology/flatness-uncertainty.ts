@@ -1,14 +1,14 @@
 import type { CrossValidation } from './cross-validation'
-import { designMatrix } from './design-matrix'
+import { designMatrix, linearCombination } from './design-matrix'
 import type { MeasuredPlaces } from './measured-area'
 import { createMinimumZoneSolver } from './minimum-zone'
-import { drawCoefficients } from './posterior-draws'
+import { drawCoefficientPairs } from './posterior-draws'
 import type { SurfaceFit } from './surface-fit'
 
-/** Draws of the whole surface; the spread of so many is known to about a tenth. */
-const DRAWS = 48
+/** Draws of the whole surface, each taken with its opposite; the spread of so many is known to about a tenth. */
+const DRAW_PAIRS = 24
 /** Rim places used for draws: the spread needs fewer than the figure itself. */
-const DRAW_PLACES = 2600
+const DRAW_PLACES = 1800
 /**
  * Share of what left-out bands miss that is counted for places between bands that were read: a left-out band
  * lies a whole spacing from its neighbours, a place between bands half of one at most. Chosen on seeded
@@ -47,41 +47,30 @@ export function surfaceUncertainty(
   const yMm = Float64Array.from(picked, (i) => places.yMm[i]!)
   const terms = fit.active.length
   const design = designMatrix(fit.basis, fit.active, picked.length, xMm, yMm)
-  const draws = drawCoefficients(fit, DRAWS)
+  const centralGaps = linearCombination(design, fit.coefficients, terms, picked.length)
+  const draws = drawCoefficientPairs(fit, DRAW_PAIRS)
   const solver = createMinimumZoneSolver(xMm, yMm)
+  const central = solver.solve(centralGaps).width
   const gaps = new Float64Array(picked.length)
-  const central = minimumZoneOf(solver, design, fit.coefficients, terms, gaps)
   let sum = 0
   let sumOfSquares = 0
-  const coefficients = new Float64Array(terms)
-  for (let d = 0; d < DRAWS; d++) {
-    for (let a = 0; a < terms; a++) coefficients[a] = fit.coefficients[a]! + draws[d * terms + a]!
-    const deviation = minimumZoneOf(solver, design, coefficients, terms, gaps) - central
-    sum += deviation
-    sumOfSquares += deviation * deviation
+  for (let d = 0; d < DRAW_PAIRS; d++) {
+    const draw = draws.subarray(d * terms, (d + 1) * terms)
+    const departures = linearCombination(design, draw, terms, picked.length)
+    for (const sign of [1, -1]) {
+      for (let i = 0; i < gaps.length; i++) gaps[i] = centralGaps[i]! + sign * departures[i]!
+      const deviation = solver.solve(gaps).width - central
+      sum += deviation
+      sumOfSquares += deviation * deviation
+    }
   }
-  const mean = sum / DRAWS
-  const spread = Math.sqrt(Math.max(0, sumOfSquares - DRAWS * mean * mean) / (DRAWS - 1))
+  const count = 2 * DRAW_PAIRS
+  const mean = sum / count
+  const spread = Math.sqrt(Math.max(0, sumOfSquares - count * mean * mean) / (count - 1))
   const missed = SHARE_OF_CROSS_VALIDATION * Math.min(crossValidation.typicalExcess, minimumZoneBands)
   return {
     centreLine: spread,
     betweenBands: Math.hypot(missed, MODEL_FLOOR_BANDS),
     bias: mean,
   }
-}
-
-function minimumZoneOf(
-  solver: ReturnType<typeof createMinimumZoneSolver>,
-  design: Float64Array,
-  coefficients: Float64Array,
-  terms: number,
-  gaps: Float64Array,
-): number {
-  for (let i = 0; i < gaps.length; i++) {
-    let sum = 0
-    const row = i * terms
-    for (let a = 0; a < terms; a++) sum += design[row + a]! * coefficients[a]!
-    gaps[i] = sum
-  }
-  return solver.solve(gaps).width
 }

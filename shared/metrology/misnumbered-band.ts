@@ -13,7 +13,7 @@ const LESS_BENT = 0.6
 const SIMPLE_FUNCTIONS = 15
 const PASSES = 12
 /** Clicks that settle so simple a surface. */
-const SIMPLE_CLICKS = 800
+const SIMPLE_CLICKS = 480
 const LEAST_DEPARTURE_BANDS = 0.02
 
 /**

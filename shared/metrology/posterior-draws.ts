@@ -7,26 +7,21 @@ import type { SurfaceFit } from './surface-fit'
 const SEED = 20_260_113
 
 /**
- * Draws of the surface's coefficients from their posterior, less their mean: antithetic pairs (each draw is
- * followed by its negative), `count` of them (made even), row by row.
+ * Draws of the surface's coefficients from their posterior, less their mean, row by row. Each stands for a pair,
+ * itself and its opposite, which is as likely (antithetic draws).
  */
-export function drawCoefficients(fit: SurfaceFit, count: number): Float64Array {
+export function drawCoefficientPairs(fit: SurfaceFit, pairs: number): Float64Array {
   const terms = fit.active.length
-  const pairs = Math.ceil(count / 2)
-  const out = new Float64Array(2 * pairs * terms)
+  const out = new Float64Array(pairs * terms)
   const random = xoroshiro128plus(SEED)
-  const draw = new Float64Array(terms)
   for (let p = 0; p < pairs; p++) {
+    const draw = out.subarray(p * terms, (p + 1) * terms)
     for (let a = 0; a < terms; a++) {
       // Box and Muller's transform.
       const radius = Math.sqrt(-2 * Math.log(1 - uniformFloat64(random)))
       draw[a] = radius * Math.cos(2 * Math.PI * uniformFloat64(random))
     }
     solveLowerTransposed(fit.precisionFactor, terms, draw)
-    for (let a = 0; a < terms; a++) {
-      out[2 * p * terms + a] = draw[a]!
-      out[(2 * p + 1) * terms + a] = -draw[a]!
-    }
   }
   return out
 }

@@ -1,6 +1,6 @@
 import type { PartFrame } from '../geometry/part-frame'
 import { isMeasured, type MeasuredArea } from './measured-area'
-import { gapAt, type SurfaceFit, type TracedPoints } from './surface-fit'
+import type { SurfaceFit, TracedPoints } from './surface-fit'
 import type { TracedReading } from './types'
 
 export type ArrowReading =
@@ -80,6 +80,6 @@ function aboutPx(
 
 /** Slope of the fitted gap at a place of the photograph, bands per px. */
 function gapSlope(fit: SurfaceFit, frame: PartFrame, x: number, y: number): readonly [number, number] {
-  const at = (xPx: number, yPx: number) => gapAt(fit, ...frame.toMm(xPx, yPx))
+  const at = (xPx: number, yPx: number) => fit.gapAt(...frame.toMm(xPx, yPx))
   return [(at(x + 1, y) - at(x - 1, y)) / 2, (at(x, y + 1) - at(x, y - 1)) / 2]
 }

@@ -3,7 +3,6 @@ import { bandHeightUm } from './band-height'
 import { readBands, worstBand } from './band-readings'
 import { drawUpBudget, expandedUncertaintyUm, notStatedIn } from './budget'
 import { leaveOutBands } from './cross-validation'
-import { designMatrix } from './design-matrix'
 import { acrossMmOf, degreeFor, FINE_DEGREE, faceBasis, USUAL_DEGREE } from './face-basis'
 import { surfaceUncertainty } from './flatness-uncertainty'
 import { type FormFit, fitForm, formStatements, formWord } from './form-terms'
@@ -19,7 +18,7 @@ import { flatnessParameters } from './parameters'
 import { readPressArrow } from './press-arrow'
 import { rimDistancesMm, steepestRimSlope } from './rim'
 import { supportedPlaces } from './support'
-import { fitSurface, gapAt, type SurfaceFit, type TracedPoints } from './surface-fit'
+import { fitSurface, gapsAt, type SurfaceFit, type TracedPoints } from './surface-fit'
 import { clicksOutside, clicksThatDoNotFit, crossedBands, finding, missingForAFigure } from './trace-checks'
 import type {
   FacePlace,
@@ -33,7 +32,7 @@ import type {
 } from './types'
 
 /** Changes whenever the same marks may give another figure. */
-export const ENGINE_VERSION = '1.0.0'
+export const ENGINE_VERSION = '1.1.0'
 
 /** A bend whose band reading departs from the figure by more than this share, and by U, is told of. */
 const SHOP_METHOD_SHARE = 0.25
@@ -148,7 +147,7 @@ function figureFrom(
     points,
     fit,
     (others) => tryFit(others, reading, frame),
-    (other, i) => gapAt(other, points.xMm[i]!, points.yMm[i]!),
+    (other, i) => other.gapAt(points.xMm[i]!, points.yMm[i]!),
   )
   if (wrong !== null) return refused([misnumbered(reading, wrong)])
   const misfits = clicksThatDoNotFit(reading, points, fit)
@@ -264,15 +263,7 @@ function misnumbered(reading: TracedReading, index: number): Finding {
 
 /** Heights of the fitted surface, high up: the gap turned over. */
 function heightsAt(fit: SurfaceFit, xMm: Float64Array, yMm: Float64Array, bandUm: number): Float64Array {
-  const terms = fit.active.length
-  const design = designMatrix(fit.basis, fit.active, xMm.length, xMm, yMm)
-  const heights = new Float64Array(xMm.length)
-  for (let i = 0; i < heights.length; i++) {
-    let gap = 0
-    for (let a = 0; a < terms; a++) gap += design[i * terms + a]! * fit.coefficients[a]!
-    heights[i] = -gap * bandUm
-  }
-  return heights
+  return gapsAt(fit, xMm, yMm).map((gap) => -gap * bandUm)
 }
 
 interface Plane {

@@ -1,7 +1,7 @@
 import type { PartFrame } from '../geometry/part-frame'
 import { acrossMmOf } from './face-basis'
 import type { MeasuredPlaces } from './measured-area'
-import { gapAt, type SurfaceFit } from './surface-fit'
+import type { SurfaceFit } from './surface-fit'
 import type { TracedReading } from './types'
 
 type Place = readonly [number, number]
@@ -55,8 +55,8 @@ export function steepestRimSlope(
     const [x, y] = [places.xMm[i]!, places.yMm[i]!]
     const r = Math.hypot(x, y) || 1
     const step = 0.01 * r
-    const inner = gapAt(fit, x - (step * x) / r, y - (step * y) / r)
-    const slope = (gapAt(fit, x, y) - inner) / step
+    const inner = fit.gapAt(x - (step * x) / r, y - (step * y) / r)
+    const slope = (fit.gapAt(x, y) - inner) / step
     steepest = Math.max(steepest, Math.abs(slope - tiltAcross(fit, places, x / r, y / r)) * bandUm)
   }
   return steepest
@@ -68,7 +68,7 @@ function tiltAcross(fit: SurfaceFit, places: MeasuredPlaces, ux: number, uy: num
   const stride = Math.max(1, Math.floor(places.interiorCount / 200))
   for (let i = 0; i < places.interiorCount; i += stride) {
     const u = places.xMm[i]! * ux + places.yMm[i]! * uy
-    const g = gapAt(fit, places.xMm[i]!, places.yMm[i]!)
+    const g = fit.gapAt(places.xMm[i]!, places.yMm[i]!)
     su += u
     sg += g
     suu += u * u

@@ -16,7 +16,9 @@ export function supportedPlaces(grid: MapGrid, points: TracedPoints, spacingMm: 
   const offer = (cell: number, click: number) => {
     const x = x0Mm + (cell % columns) * stepMm
     const y = y0Mm + Math.floor(cell / columns) * stepMm
-    const d = Math.hypot(x - points.xMm[click]!, y - points.yMm[click]!) / spacingMm[click]!
+    const dx = x - points.xMm[click]!
+    const dy = y - points.yMm[click]!
+    const d = Math.sqrt(dx * dx + dy * dy) / spacingMm[click]!
     if (d >= distance[cell]!) return
     distance[cell] = d
     nearest[cell] = click

@@ -1,5 +1,6 @@
 import { choleskyInPlace, invertLower, solveLower, solveLowerTransposed } from './cholesky'
-import { accumulateNormalEquations, designMatrix, pickColumns, rowDot } from './design-matrix'
+import { type ClickRuns, meanRows, meanValues, runsOfClicks } from './click-runs'
+import { accumulateNormalEquations, designMatrix, linearCombination, pickColumns } from './design-matrix'
 import type { SurfaceBasis } from './surface-basis'
 
 /**
@@ -25,6 +26,8 @@ export interface SurfaceFit {
   readonly active: Int32Array
   /** Gap in bands = Σ coefficients × active functions. */
   readonly coefficients: Float64Array
+  /** The fitted gap at a place of the part frame, bands. */
+  gapAt(xMm: number, yMm: number): number
   /** Lower Cholesky factor of the posterior precision (bands⁻²) of the active functions, row-major. */
   readonly precisionFactor: Float64Array
   /** Standard deviation of a click square to its band. */
@@ -56,6 +59,8 @@ const USUAL_CLICK_NOISE_PX = 0.5
 const USUAL_NOISE_WORTH = 8
 const REWEIGHTINGS = 8
 const EVIDENCE_STEPS = 8
+/** For weights that are about to change, and for a smoothness that has settled before. */
+const FEW_EVIDENCE_STEPS = 3
 /** The evidence has settled when no component that matters changes its deviation by more than this share. */
 const SETTLED_SHARE = 0.05
 /** Prior deviation that every shrunk component starts from, bands: a loose start invents form where there are no bands. */
@@ -67,6 +72,8 @@ const LEAST_SD_BANDS = 1e-6
 const NEGLIGIBLE_INFORMATION = 1e-3
 /** Clicks that suffice to choose the functions. */
 const ENOUGH_TO_CHOOSE = 700
+/** Rows that suffice to fit the chosen functions; more clicks are taken in runs of neighbours. */
+const ENOUGH_ROWS = 1200
 
 /**
  * Fits the gap through the clicks: least squares weighted by each click's own error, Huber weights against
@@ -91,13 +98,22 @@ export function fitSurface(points: TracedPoints, basis: SurfaceBasis): SurfaceFi
   return refine(fit)
 }
 
-/** The fitted gap at a place of the part frame, bands. */
-export function gapAt(fit: SurfaceFit, xMm: number, yMm: number): number {
-  const functions = new Float64Array(fit.basis.size)
-  fit.basis.evaluate(xMm, yMm, functions, 0)
-  let gap = 0
-  for (let a = 0; a < fit.active.length; a++) gap += fit.coefficients[a]! * functions[fit.active[a]!]!
-  return gap
+/** The fitted gap at places of the part frame, bands. */
+export function gapsAt(fit: SurfaceFit, xMm: Float64Array, yMm: Float64Array): Float64Array {
+  return xMm.map((x, i) => fit.gapAt(x, yMm[i]!))
+}
+
+/** The fitted gap as a function of the place in the part frame, bands. */
+function gapFunction(
+  basis: SurfaceBasis,
+  active: Int32Array,
+  coefficients: Float64Array,
+): (xMm: number, yMm: number) => number {
+  const all = new Float64Array(basis.size)
+  active.forEach((f, a) => {
+    all[f] = coefficients[a]!
+  })
+  return basis.combine(all)
 }
 
 /** Every so-manieth click, `count` in all; all of them where they are fewer. */
@@ -132,16 +148,17 @@ function refine(fit: Fitting): SurfaceFit {
   while (iterations < REWEIGHTINGS && !converged) {
     const before = fit.noise
     const isBlind = !fit.knowsSlopes
-    const settled = fit.settleEvidence(isBlind ? 3 : EVIDENCE_STEPS)
+    const settled = fit.settleEvidence(isBlind || fit.beganFromFit ? FEW_EVIDENCE_STEPS : EVIDENCE_STEPS)
     fit.reweigh()
     iterations++
     // The weights that came of a blind pass are no test of convergence, nor are those that came of the next.
     if (!isBlind) seeing++
     const enough = seeing >= (fit.beganFromFit ? 1 : 2)
-    converged = settled && enough && Math.abs(fit.noise - before) < 0.005 * fit.noise
+    // A fit that began from another's surface has that one's smoothness, which has settled.
+    converged = (settled || fit.beganFromFit) && enough && Math.abs(fit.noise - before) < 0.005 * fit.noise
     if (!converged) fit.leaveOutNegligible()
   }
-  fit.settleEvidence(1)
+  if (!converged) fit.settleEvidence(1)
   fit.measureResiduals()
   return fit.result(iterations, converged)
 }
@@ -153,10 +170,9 @@ class Fitting {
   private inPixels = false
   beganFromFit = false
   private readonly count: number
+  private readonly runs: ClickRuns
   private active: Int32Array
   private design: Float64Array
-  private right: Float64Array
-  private down: Float64Array
   private gram: Float64Array
   private moment: Float64Array
   private precision: Float64Array
@@ -179,11 +195,10 @@ class Fitting {
   ) {
     const { count } = points
     this.count = count
+    this.runs = runsOfClicks(points.traceOf, count, Math.ceil(count / ENOUGH_ROWS))
     this.active = active
     this.scales = scales
     this.design = designMatrix(basis, active, count, points.xMm, points.yMm)
-    this.right = designMatrix(basis, active, count, points.xMmRight, points.yMmRight)
-    this.down = designMatrix(basis, active, count, points.xMmDown, points.yMmDown)
     // The first pass knows no slopes: every click weighs the same, with an error of a tenth of a band.
     this.weights = new Float64Array(count).fill(1)
     this.rowWeight = new Float64Array(count).fill(1)
@@ -213,11 +228,12 @@ class Fitting {
   /** Re-estimates the components' variances with the weights as they are; true when they have settled. */
   settleEvidence(steps: number): boolean {
     const terms = this.active.length
+    const rows = this.rowsToFit()
     accumulateNormalEquations(
-      this.design,
-      this.points.order,
-      this.rowWeight,
-      this.count,
+      rows.design,
+      rows.order,
+      rows.rowWeight,
+      this.runs.count,
       terms,
       this.gram,
       this.moment,
@@ -233,6 +249,16 @@ class Fitting {
     this.mixVariances()
     this.solvePosterior()
     return settled
+  }
+
+  /** The clicks, or their runs where there are more than the fit needs. */
+  private rowsToFit(): { design: Float64Array; order: Float64Array; rowWeight: Float64Array } {
+    const { runs, design, rowWeight, points } = this
+    if (runs.count === this.count) return { design, order: points.order, rowWeight }
+    return {
+      ...meanRows(runs, design, this.active.length, rowWeight),
+      order: meanValues(runs, points.order, rowWeight),
+    }
   }
 
   private mixVariances(): void {
@@ -307,12 +333,13 @@ class Fitting {
   }
 
   private weightedNoise(): number {
+    const fitted = linearCombination(this.design, this.coefficients, this.active.length, this.count)
     let sum = 0
     let used = 0
     for (let i = 0; i < this.count; i++) {
       const w = this.rowWeight[i]!
       if (w === 0) continue
-      const r = this.points.order[i]! - rowDot(this.design, this.coefficients, this.active.length, i)
+      const r = this.points.order[i]! - fitted[i]!
       sum += w * r * r
       used++
     }
@@ -349,23 +376,22 @@ class Fitting {
 
   /** Distances of the clicks from the fitted bands, px, by the slopes that weigh them. */
   measureResiduals(): void {
-    const terms = this.active.length
+    const fitted = linearCombination(this.design, this.coefficients, this.active.length, this.count)
     for (let i = 0; i < this.count; i++) {
-      const rest = this.points.order[i]! - rowDot(this.design, this.coefficients, terms, i)
-      this.residualsPx[i] = rest / this.slope[i]!
+      this.residualsPx[i] = (this.points.order[i]! - fitted[i]!) / this.slope[i]!
     }
   }
 
   private measureSlopes(): void {
-    const { count, slope, coefficients } = this
-    const terms = this.active.length
+    const { count, points, slope } = this
+    const gap = gapFunction(this.basis, this.active, this.coefficients)
     let sumOfSquares = 0
     for (let i = 0; i < count; i++) {
-      const here = rowDot(this.design, coefficients, terms, i)
-      const dx = rowDot(this.right, coefficients, terms, i) - here
-      const dy = rowDot(this.down, coefficients, terms, i) - here
-      slope[i] = Math.hypot(dx, dy)
-      sumOfSquares += slope[i]! * slope[i]!
+      const here = gap(points.xMm[i]!, points.yMm[i]!)
+      const right = gap(points.xMmRight[i]!, points.yMmRight[i]!) - here
+      const down = gap(points.xMmDown[i]!, points.yMmDown[i]!) - here
+      slope[i] = Math.sqrt(right * right + down * down)
+      sumOfSquares += right * right + down * down
     }
     // Where the gap is level (the middle of a saddle or of rings) the click's error acts through the
     // curvature instead: a floor keeps such a click from outweighing all others.
@@ -389,8 +415,6 @@ class Fitting {
     }
     if (kept.length === terms) return
     this.design = pickColumns(this.design, this.count, terms, kept)
-    this.right = pickColumns(this.right, this.count, terms, kept)
-    this.down = pickColumns(this.down, this.count, terms, kept)
     this.active = Int32Array.from(kept, (a) => this.active[a]!)
   }
 
@@ -400,6 +424,7 @@ class Fitting {
       basis: this.basis,
       active: this.active,
       coefficients: this.coefficients.slice(0, terms),
+      gapAt: gapFunction(this.basis, this.active, this.coefficients),
       precisionFactor: this.precision.slice(0, terms * terms),
       clickNoisePx: this.noise,
       effectiveTerms: this.effectiveTerms,

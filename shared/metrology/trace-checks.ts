@@ -117,8 +117,10 @@ export function pathsCross(p: readonly Place[], q: readonly Place[]): Place | nu
 }
 
 function segmentsCross(a: Place, b: Place, c: Place, d: Place): Place | null {
-  const [rx, ry] = [b[0] - a[0], b[1] - a[1]]
-  const [sx, sy] = [d[0] - c[0], d[1] - c[1]]
+  const rx = b[0] - a[0]
+  const ry = b[1] - a[1]
+  const sx = d[0] - c[0]
+  const sy = d[1] - c[1]
   const cross = rx * sy - ry * sx
   if (cross === 0) return null
   const t = ((c[0] - a[0]) * sy - (c[1] - a[1]) * sx) / cross
