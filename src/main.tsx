@@ -22,7 +22,7 @@ createRoot(root).render(
           unstyled: true,
           classNames: {
             toast:
-              'flex items-center gap-3 rounded border border-ink bg-field px-4 py-2.5 text-body text-ink',
+              'flex items-center gap-3 rounded border border-ink bg-field px-4 py-2.5 font-sans text-body text-ink',
           },
         }}
       />

@@ -30,6 +30,8 @@ const rowColumns = {
   updatedAt: readings.updatedAt,
   face: faces,
   photoSha256,
+  marksVersion: readings.marksVersion,
+  sentBackReason: readings.sentBackReason,
 }
 
 const summaryColumns = {

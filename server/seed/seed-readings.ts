@@ -128,6 +128,8 @@ function conditionsOf({ soakMinutes, note }: DemoReading): Conditions {
     temperatureHalfWidthUm: null,
     meanGapUm: null,
     supportHalfWidthUm: null,
+    edgePlacementUMm: 0.05,
+    repeats: { standardDeviationUm: 0.008, count: 6 },
     note,
   }
 }

@@ -37,6 +37,7 @@ function storedMap(grid: HeightGrid): Figure['map'] {
     stepMm,
     heightsNm: Array.from(grid.heightsUm, (um) => (Number.isNaN(um) ? null : Math.round(um * 1000))),
     supported: Array.from(grid.supported, (flag) => (flag === 0 ? 0 : 1)),
+    coveragePercent: Array.from(grid.coverage, (share) => Math.round(100 * share)),
   }
 }
 

@@ -2,6 +2,7 @@
 
 export { bandHeightUm } from './band-height'
 export { type Decision, type DecisionInput, decide, riskOfAcceptance } from './decision'
+export { engineSetUp } from './engine-set-up'
 export { figureForStorage, storedFinding } from './figure-record'
 export { ENGINE_VERSION, readTraces } from './read-traces'
 export { fromMeasureFile, type MarkedPhoto, toReadingInput } from './reading-input'

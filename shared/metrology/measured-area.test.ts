@@ -147,6 +147,29 @@ describe('the places at which figures are taken', () => {
   })
 })
 
+describe('the share of each cell of the map', () => {
+  it('adds up to the measured area, finer than a count of cells', () => {
+    const area = areaOf(disc)
+    const grid = mapGrid(area)
+    const areaMm2 = grid.coverage.reduce((sum, share) => sum + share, 0) * grid.stepMm ** 2
+    // The outermost half cells reach beyond the grid.
+    expect(areaMm2).toBeGreaterThan(0.99 * area.areaMm2)
+    expect(areaMm2).toBeLessThan(1.001 * area.areaMm2)
+  })
+
+  it('is whole inside, nothing outside, and in between at the rim only', () => {
+    const grid = mapGrid(areaOf(disc))
+    const rimMm = 40 / 2 - 0.8
+    grid.coverage.forEach((share, cell) => {
+      const x = grid.x0Mm + (cell % grid.columns) * grid.stepMm
+      const y = grid.y0Mm + Math.floor(cell / grid.columns) * grid.stepMm
+      const inside = rimMm - Math.hypot(x, y)
+      if (inside > grid.stepMm) expect(share).toBe(1)
+      if (inside < -grid.stepMm) expect(share).toBe(0)
+    })
+  })
+})
+
 describe('a polygon with its sides moved', () => {
   const square = [
     [0, 0],

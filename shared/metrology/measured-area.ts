@@ -244,6 +244,8 @@ export interface MapGrid {
   readonly index: Int32Array
   readonly xMm: Float64Array
   readonly yMm: Float64Array
+  /** Share of every cell that is measured, 0 to 1: its contour at one half is the rim, finer than the grid. */
+  readonly coverage: Float32Array
 }
 
 /** A grid of `across` places over the longer side of the measured area. */
@@ -266,7 +268,9 @@ export function mapGrid(area: MeasuredArea, across = 96): MapGrid {
       ys.push(y)
     }
   }
+  const isHeld = (x: number, y: number) => spansHold(area.pixels, ...area.frame.toPx(x, y))
   return {
+    coverage: cellCoverage({ columns, rows, x0Mm: left, y0Mm: top, stepMm }, index, isHeld),
     columns,
     rows,
     x0Mm: left,
@@ -276,6 +280,56 @@ export function mapGrid(area: MeasuredArea, across = 96): MapGrid {
     xMm: Float64Array.from(xs),
     yMm: Float64Array.from(ys),
   }
+}
+
+/** Places across a cell that are asked for its share. */
+const COVERAGE_PLACES = 5
+
+/** Cells whose neighbours are all measured, or none of them, are whole or empty; only the others are looked into. */
+function cellCoverage(
+  { columns, rows, x0Mm, y0Mm, stepMm }: Pick<MapGrid, 'columns' | 'rows' | 'x0Mm' | 'y0Mm' | 'stepMm'>,
+  index: readonly number[],
+  isHeld: (xMm: number, yMm: number) => boolean,
+): Float32Array {
+  const held = new Uint8Array(columns * rows)
+  for (const cell of index) held[cell] = 1
+  const coverage = new Float32Array(columns * rows)
+  for (let r = 0; r < rows; r++) {
+    for (let c = 0; c < columns; c++) {
+      const about = heldAbout(held, columns, rows, c, r)
+      coverage[r * columns + c] =
+        about === 0 || about === 9
+          ? about / 9
+          : shareHeld(x0Mm + c * stepMm, y0Mm + r * stepMm, stepMm, isHeld)
+    }
+  }
+  return coverage
+}
+
+/** How many of a cell and its eight neighbours are measured; beyond the grid none is. */
+function heldAbout(held: Uint8Array, columns: number, rows: number, c: number, r: number): number {
+  let count = 0
+  for (let y = Math.max(0, r - 1); y <= Math.min(rows - 1, r + 1); y++) {
+    for (let x = Math.max(0, c - 1); x <= Math.min(columns - 1, c + 1); x++) count += held[y * columns + x]!
+  }
+  return count
+}
+
+function shareHeld(
+  xMm: number,
+  yMm: number,
+  stepMm: number,
+  isHeld: (xMm: number, yMm: number) => boolean,
+): number {
+  let count = 0
+  for (let i = 0; i < COVERAGE_PLACES; i++) {
+    for (let j = 0; j < COVERAGE_PLACES; j++) {
+      const dx = ((i + 0.5) / COVERAGE_PLACES - 0.5) * stepMm
+      const dy = ((j + 0.5) / COVERAGE_PLACES - 0.5) * stepMm
+      if (isHeld(xMm + dx, yMm + dy)) count++
+    }
+  }
+  return count / COVERAGE_PLACES ** 2
 }
 
 function extentMm({ pixels, frame }: MeasuredArea): [number, number, number, number] {

@@ -306,7 +306,8 @@ function heightGrid(
   const mmPerPx = frame.mmPerPx(cx, cy)
   const spacingMm = fit.slopePerPx.map((slope) => mmPerPx / slope)
   const { columns, rows, x0Mm, y0Mm, stepMm } = grid
-  return { columns, rows, x0Mm, y0Mm, stepMm, heightsUm, supported: supportedPlaces(grid, points, spacingMm) }
+  const supported = supportedPlaces(grid, points, spacingMm)
+  return { columns, rows, x0Mm, y0Mm, stepMm, heightsUm, supported, coverage: grid.coverage }
 }
 
 function shareSupported(grid: HeightGrid): number {

@@ -15,6 +15,7 @@ const grid: MapGrid = {
   index: Int32Array.from({ length: columns * rows }, (_, i) => i),
   xMm: Float64Array.from({ length: columns * rows }, (_, i) => -15 + (i % columns) * stepMm),
   yMm: Float64Array.from({ length: columns * rows }, (_, i) => -10 + Math.floor(i / columns) * stepMm),
+  coverage: new Float32Array(columns * rows).fill(1),
 }
 
 function clicks(places: readonly (readonly [number, number])[]): TracedPoints {

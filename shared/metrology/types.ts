@@ -150,6 +150,8 @@ export interface HeightGrid {
   stepMm: number
   heightsUm: Float32Array
   supported: Uint8Array
+  /** Share of every cell that is measured, 0 to 1. */
+  coverage: Float32Array
 }
 
 /** The shop's reading of one band with a straightedge: bow ÷ spacing × band height. */

@@ -29,6 +29,20 @@ export const conditionsSchema = z.object({
   temperatureHalfWidthUm: z.number().min(0).max(10).nullable(),
   meanGapUm: z.number().min(0).max(1000).nullable(),
   supportHalfWidthUm: z.number().min(0).max(10).nullable(),
+  /** How well the outline is placed on the photograph, standard uncertainty, mm. */
+  edgePlacementUMm: z.number().min(0).max(10).nullable().default(null),
+  /** Readings of this piece with the flat lifted, cleaned and laid again: their spread and how many. */
+  repeats: z
+    .object({
+      standardDeviationUm: z.number({ error: 'reading.repeats.spread' }).positive().max(10),
+      count: z
+        .number({ error: 'reading.repeats.count' })
+        .int('reading.repeats.count')
+        .min(2, 'reading.repeats.count')
+        .max(1000),
+    })
+    .nullable()
+    .default(null),
   note: z.string().max(1000),
 })
 export type Conditions = z.infer<typeof conditionsSchema>
@@ -77,6 +91,8 @@ export const readingRowSchema = z.object({
   updatedAt: z.string(),
   face: faceSchema,
   photoSha256: z.string().nullable(),
+  marksVersion: z.number().int(),
+  sentBackReason: z.string().nullable(),
   result: resultSummarySchema.nullable(),
 })
 export type ReadingRow = z.infer<typeof readingRowSchema>
@@ -86,7 +102,6 @@ export const readingSchema = readingRowSchema.extend({
   setUp: setUpSchema,
   conditions: conditionsSchema,
   marks: marksSchema,
-  marksVersion: z.number().int(),
   photos: z.array(photoSchema),
   /** Latest result computed by the server, whole; null before the first. */
   fullResult: readingResultSchema.nullable(),
@@ -94,7 +109,8 @@ export const readingSchema = readingRowSchema.extend({
   mayEdit: z.boolean(),
   maySend: z.boolean(),
   setAsideCause: z.string().nullable(),
-  sentBackReason: z.string().nullable(),
+  /** Marks, set-up, equipment or the face have changed since the figure, so that it can't be sent. */
+  figureIsStale: z.boolean(),
 })
 export type Reading = z.infer<typeof readingSchema>
 

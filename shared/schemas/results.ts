@@ -116,6 +116,8 @@ export const figureSchema = z.object({
     /** Height about the least squares plane, whole nm; null off the measured area. */
     heightsNm: z.array(z.number().int().nullable()),
     supported: z.array(z.union([z.literal(0), z.literal(1)])),
+    /** Share of each cell that is measured: the rim is its contour at one half. Engine 1.0.0 gave none. */
+    coveragePercent: z.array(z.number().int()).optional(),
   }),
   fit: z.object({
     model: z.string(),

@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next'
 import { useParams } from 'react-router-dom'
 import { ErrorState } from '@/components/error-state'
 import { Loading } from '@/components/loading'
+import { ChangeSetUp } from '@/features/new-reading/change-set-up'
 import { PhotoUploader } from '@/features/photos/photo-uploader'
 import { BudgetSection } from '@/features/readings/budget-section'
 import { EventsSection } from '@/features/readings/events-section'
@@ -34,7 +35,7 @@ export function ReadingPage() {
       {fullResult && <FindingsSection findings={fullResult.findings} />}
       {fullResult?.figure && <BudgetSection figure={fullResult.figure} />}
       <PhotoSection reading={query.data} uploader={mayEdit && <PhotoUploader readingId={id} />} />
-      <SetUpSection reading={query.data} />
+      <SetUpSection reading={query.data} change={mayEdit && <ChangeSetUp reading={query.data} />} />
       <ConditionsSection reading={query.data} />
       <EventsSection readingId={id} />
     </>

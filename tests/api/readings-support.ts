@@ -26,6 +26,8 @@ export const blankConditions: Conditions = {
   temperatureHalfWidthUm: null,
   meanGapUm: null,
   supportHalfWidthUm: null,
+  edgePlacementUMm: null,
+  repeats: null,
   note: '',
 }
 

@@ -2,6 +2,7 @@ import sharp from 'sharp'
 import { describe, expect, it } from 'vitest'
 import { results } from '../../server/db/schema/results'
 import {
+  blankConditions,
   blankSetUp,
   bowedMarks,
   lampBandUm,
@@ -82,6 +83,58 @@ describe('computing a result', () => {
     expect([unmarked.status, unlit.status]).toEqual([400, 400])
     expect(unmarked.body.error.fields['marks.outline']).toMatch(/outline/)
     expect(unlit.body.error.fields['setUp.lightSourceId']).toMatch(/light source/)
+  })
+})
+
+describe('a figure of a set-up that was changed since', () => {
+  it('is said to be stale until it is computed again, and then holds what is stated now', async () => {
+    const bench = await startAtBench()
+    const { agent } = bench.inspector
+    const reading = await takeMeasuredReading(bench, 1)
+    expect(reading.figureIsStale).toBe(false)
+    expect(reading.fullResult?.figure?.notStated).toEqual(expect.arrayContaining(['repeat', 'outline']))
+    const conditions = {
+      ...blankConditions,
+      edgePlacementUMm: 0.2,
+      repeats: { standardDeviationUm: 0.03, count: 4 },
+    }
+    const path = `/api/readings/${reading.id}`
+    const changed = await agent.patch(path).send({ conditions }).expect(200)
+    expect(changed.body.figureIsStale).toBe(true)
+    await agent.post(`${path}/compute`).expect(200)
+    const again = await agent.get(path).expect(200)
+    expect(again.body.figureIsStale).toBe(false)
+    expect(again.body.fullResult.figure.notStated).not.toContain('repeat')
+    expect(again.body.fullResult.figure.notStated).not.toContain('outline')
+    expect(again.body.fullResult.expandedUncertaintyUm).toBeGreaterThan(
+      reading.fullResult?.expandedUncertaintyUm ?? 0,
+    )
+  })
+
+  it('is stale as well when the lamp is found to have another wavelength', async () => {
+    const bench = await startAtBench()
+    const reading = await takeMeasuredReading(bench, 1)
+    const administrator = await bench.signInAs('admin')
+    const lamp = await administrator.agent.get('/api/equipment').expect(200)
+    const row = lamp.body.rows.find((item: { id: string }) => item.id === bench.lightSourceId)
+    await administrator.agent
+      .patch(`/api/equipment/${row.id}`)
+      .send({ details: { ...row.details, wavelengthNm: 546.1 } })
+      .expect(200)
+    const shown = await bench.inspector.agent.get(`/api/readings/${reading.id}`).expect(200)
+    expect(shown.body.figureIsStale).toBe(true)
+  })
+})
+
+describe('repeats', () => {
+  it('are stated with their spread and their number, or not at all', async () => {
+    const bench = await startAtBench()
+    const reading = await takeReading(bench)
+    const answer = await bench.inspector.agent
+      .patch(`/api/readings/${reading.id}`)
+      .send({ conditions: { ...blankConditions, repeats: { standardDeviationUm: 0.03 } } })
+    expect(answer.status).toBe(400)
+    expect(answer.body.error.fields['conditions.repeats.count']).toMatch(/how many repeats/)
   })
 })
 

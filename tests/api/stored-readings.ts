@@ -83,6 +83,8 @@ const blank = {
     temperatureHalfWidthUm: null,
     meanGapUm: null,
     supportHalfWidthUm: null,
+    edgePlacementUMm: null,
+    repeats: null,
     note: '',
   },
 }

@@ -125,6 +125,8 @@ const nothingStated = {
     temperatureHalfWidthUm: null,
     meanGapUm: null,
     supportHalfWidthUm: null,
+    edgePlacementUMm: null,
+    repeats: null,
     note: '',
   },
 }

@@ -10,6 +10,7 @@ import { selectReadingRows } from '../../db/reading-rows'
 import { readings } from '../../db/schema/readings'
 import { notFound } from '../../errors'
 import { selectPhotos } from '../photos/select-photos'
+import { selectCurrentFigure } from '../results/current-figure'
 import { selectResult } from '../results/select-result'
 import { requireReading } from './reading-record'
 
@@ -29,13 +30,13 @@ export function readReading(db: Connection, actor: Actor, id: string): Reading {
     setUp: record.setUp,
     conditions: record.conditions,
     marks: record.marks,
-    marksVersion: record.marksVersion,
     photos: selectPhotos(db, id),
     fullResult: record.latestResultId === null ? null : selectResult(db, record.latestResultId),
     correctsId: record.correctsId,
     mayEdit: own && isEditable(record.state) && may(actor.roles, 'reading:edit-own'),
     maySend: own && record.state === 'draft' && may(actor.roles, 'reading:send-own'),
     setAsideCause: record.setAsideCause,
-    sentBackReason: record.sentBackReason,
+    figureIsStale:
+      row.result?.outcome === 'figure' && isEditable(record.state) && !selectCurrentFigure(db, record),
   }
 }

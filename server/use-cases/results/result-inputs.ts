@@ -6,7 +6,7 @@ import type { ResultInputs } from '../../db/schema/results'
 import { invalidField } from '../../errors'
 import { selectPhotos } from '../photos/select-photos'
 import type { ReadingRecord } from '../readings/reading-record'
-import { engineSetUp } from './engine-set-up'
+import { requireEngineSetUp } from './engine-set-up'
 
 /** Everything that a figure of the reading comes from, as it stands now. */
 export function gatherInputs(db: Connection, record: ReadingRecord): { face: Face; inputs: ResultInputs } {
@@ -17,7 +17,7 @@ export function gatherInputs(db: Connection, record: ReadingRecord): { face: Fac
     marks,
     size: face.size,
     photo,
-    setUp: engineSetUp(db, setUp, conditions),
+    setUp: requireEngineSetUp(db, setUp, conditions),
     mirrored: setUp.mirrored,
   })
   if (!traced) throw invalidField('marks.outline', { key: 'reading.outline.missing' })

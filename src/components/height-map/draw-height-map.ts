@@ -1,7 +1,7 @@
 import { heightRgb } from '@shared/look/height-scale'
 import { contours } from 'd3-contour'
 import { type HeightGridFilled, sampleGrid } from './height-field'
-import { maskOutline } from './mask-outline'
+import { shareOutline } from './share-outline'
 
 export interface MapRange {
   leastUm: number
@@ -95,14 +95,14 @@ function drawHatching(context: CanvasRenderingContext2D, { grid, cellPx, density
     layer.lineTo(x + height, 0)
   }
   layer.stroke()
-  const outline = maskOutline(grid.unsupported, grid, cellPx, false)
+  const outline = shareOutline(grid.unsupported, grid, cellPx)
   if (!outline) return
   keepWithin(layer, outline)
   context.drawImage(layer.canvas, 0, 0)
 }
 
 function clipToMeasured(context: CanvasRenderingContext2D, { grid, cellPx, density }: MapDrawing): void {
-  const outline = maskOutline(grid.measured, grid, cellPx, true)
+  const outline = shareOutline(grid.coverage, grid, cellPx)
   if (!outline) return
   keepWithin(context, outline)
   context.strokeStyle = 'rgb(18 33 28 / 0.55)'

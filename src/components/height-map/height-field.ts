@@ -7,8 +7,8 @@ export interface HeightGridFilled {
   columns: number
   rows: number
   heightsUm: Float64Array
-  /** 1 where measured. */
-  measured: Uint8Array
+  /** Share of each cell that is measured, 0 to 1. */
+  coverage: Float64Array
   /** 1 where no trace is near. */
   unsupported: Uint8Array
   leastUm: number
@@ -33,8 +33,19 @@ export function fillGrid(map: StoredMap): HeightGridFilled {
     mostUm = Math.max(mostUm, nm / 1000)
   }
   spreadOutwards(heightsUm, measured, columns, rows)
-  if (leastUm > mostUm) return { columns, rows, heightsUm, measured, unsupported, leastUm: 0, mostUm: 0 }
-  return { columns, rows, heightsUm, measured, unsupported, leastUm, mostUm }
+  const coverage = Float64Array.from(map.heightsNm, (nm, cell) =>
+    map.coveragePercent ? map.coveragePercent[cell] / 100 : nm === null ? 0 : 1,
+  )
+  const isEmpty = leastUm > mostUm
+  return {
+    columns,
+    rows,
+    heightsUm,
+    coverage,
+    unsupported,
+    leastUm: isEmpty ? 0 : leastUm,
+    mostUm: isEmpty ? 0 : mostUm,
+  }
 }
 
 /** Ring by ring from the measured places: each place takes the height of the neighbour that reached it first. */

@@ -57,15 +57,17 @@ export function ReadingLine({ reading, to, what, note, when, needsPerson = false
   )
 }
 
-function LineFigure({ reading: { result } }: { reading: ReadingRow }) {
+function LineFigure({ reading: { result, marksVersion } }: { reading: ReadingRow }) {
   const { t } = useTranslation()
+  const isOfEarlierMarks = result !== null && result.marksVersion < marksVersion
   return (
-    <div className="text-right">
+    <div className={classNames('text-right', isOfEarlierMarks && 'text-muted')}>
       {result && result.flatnessUm !== null ? (
         <Quantity valueUm={result.flatnessUm} uUm={result.expandedUncertaintyUm} bandUm={result.bandUm} />
       ) : (
         <span className="text-muted text-second">{t('notReadYet')}</span>
       )}
+      {isOfEarlierMarks && <span className="block text-axis">{t('ofEarlierMarks')}</span>}
     </div>
   )
 }

@@ -7,7 +7,12 @@ import { formatSince } from '@/lib/format-when'
 export function WaitingRow({ reading }: { reading: ReadingRow }) {
   const { t } = useTranslation('home')
   const isBack = reading.state === 'sentBack'
-  const facts = { name: reading.takenBy.name, number: reading.number, face: reading.faceName }
+  const facts = {
+    name: reading.takenBy.name,
+    number: reading.number,
+    face: reading.faceName,
+    reason: reading.sentBackReason,
+  }
   return (
     <ReadingLine
       reading={reading}

@@ -23,6 +23,18 @@ export function ConditionFields() {
         />
         <HeightOf name="meanGapUm" label={t('new.conditions.gap')} />
         <HeightOf name="supportHalfWidthUm" label={t('new.conditions.support')} />
+        <NumberOf
+          name="edgePlacementUMm"
+          label={t('new.conditions.placement')}
+          unit="mm"
+          hint={t('new.conditions.placementHint')}
+        />
+        <HeightOf
+          name="repeatSpreadUm"
+          label={t('new.conditions.repeatSpread')}
+          hint={t('new.conditions.repeatSpreadHint')}
+        />
+        <NumberOf name="repeatCount" label={t('new.conditions.repeatCount')} />
         <TextAreaField
           label={t('new.conditions.remark')}
           className="col-span-3"
@@ -36,9 +48,16 @@ export function ConditionFields() {
 }
 
 interface NumberProps {
-  name: 'airTemperatureC' | 'partTemperatureC' | 'soakMinutes' | 'viewingAngleDeg' | 'viewingAngleUDeg'
+  name:
+    | 'airTemperatureC'
+    | 'partTemperatureC'
+    | 'soakMinutes'
+    | 'viewingAngleDeg'
+    | 'viewingAngleUDeg'
+    | 'edgePlacementUMm'
+    | 'repeatCount'
   label: string
-  unit: string
+  unit?: string
   hint?: string
 }
 
@@ -66,7 +85,7 @@ export function NumberOf({ name, label, unit, hint }: NumberProps) {
 }
 
 interface HeightProps {
-  name: 'temperatureHalfWidthUm' | 'meanGapUm' | 'supportHalfWidthUm'
+  name: 'temperatureHalfWidthUm' | 'meanGapUm' | 'supportHalfWidthUm' | 'repeatSpreadUm'
   label: string
   hint?: string
 }

@@ -1,6 +1,6 @@
 import type { Equipment, EquipmentKind } from '@shared/schemas/equipment'
 import type { TypedHeight } from '@shared/schemas/parts'
-import { newReadingSchema } from '@shared/schemas/readings'
+import { newReadingSchema, type Reading } from '@shared/schemas/readings'
 import { candidateResolver } from '@/lib/candidate-resolver'
 
 /** A new reading as its form has it; '' and null are "not stated". */
@@ -20,6 +20,9 @@ export interface NewReadingForm {
   temperatureHalfWidthUm: TypedHeight | null
   meanGapUm: TypedHeight | null
   supportHalfWidthUm: TypedHeight | null
+  edgePlacementUMm: number | null
+  repeatSpreadUm: TypedHeight | null
+  repeatCount: number | null
   note: string
 }
 
@@ -39,6 +42,9 @@ export const blankReading: NewReadingForm = {
   temperatureHalfWidthUm: null,
   meanGapUm: null,
   supportHalfWidthUm: null,
+  edgePlacementUMm: null,
+  repeatSpreadUm: null,
+  repeatCount: null,
   note: '',
 }
 
@@ -72,12 +78,51 @@ function candidateOf(form: NewReadingForm): unknown {
       temperatureHalfWidthUm: form.temperatureHalfWidthUm?.valueUm ?? null,
       meanGapUm: form.meanGapUm?.valueUm ?? null,
       supportHalfWidthUm: form.supportHalfWidthUm?.valueUm ?? null,
+      edgePlacementUMm: form.edgePlacementUMm,
+      repeats: repeatsOf(form),
       note: form.note,
     },
   }
 }
 
+/** Half of a pair is sent as it is, so that what lacks is said. */
+function repeatsOf({ repeatSpreadUm, repeatCount }: NewReadingForm): unknown {
+  if (repeatSpreadUm === null && repeatCount === null) return null
+  return { standardDeviationUm: repeatSpreadUm?.valueUm, count: repeatCount ?? undefined }
+}
+
+/** A reading's set-up and conditions as the form has them. */
+export function formOf({ pieceId, face, setUp, conditions }: Reading): NewReadingForm {
+  return {
+    pieceId,
+    faceId: face.id,
+    lightSourceId: setUp.lightSourceId ?? '',
+    referenceFlatId: setUp.referenceFlatId ?? '',
+    cameraSetUpId: setUp.cameraSetUpId ?? '',
+    thermometerId: setUp.thermometerId ?? '',
+    viewingAngleDeg: setUp.viewingAngleDeg,
+    viewingAngleUDeg: setUp.viewingAngleUDeg,
+    mirrored: setUp.mirrored,
+    airTemperatureC: conditions.airTemperatureC,
+    partTemperatureC: conditions.partTemperatureC,
+    soakMinutes: conditions.soakMinutes,
+    temperatureHalfWidthUm: typedAgain(conditions.temperatureHalfWidthUm),
+    meanGapUm: typedAgain(conditions.meanGapUm),
+    supportHalfWidthUm: typedAgain(conditions.supportHalfWidthUm),
+    edgePlacementUMm: conditions.edgePlacementUMm,
+    repeatSpreadUm: typedAgain(conditions.repeats?.standardDeviationUm ?? null),
+    repeatCount: conditions.repeats?.count ?? null,
+    note: conditions.note,
+  }
+}
+
+function typedAgain(valueUm: number | null): TypedHeight | null {
+  return valueUm === null ? null : { valueUm, typed: `${valueUm} µm` }
+}
+
 function fieldOf(path: string): keyof NewReadingForm {
+  if (path.endsWith('repeats.standardDeviationUm')) return 'repeatSpreadUm'
+  if (path.endsWith('repeats.count')) return 'repeatCount'
   const last = path.split('.').at(-1) ?? ''
   return last in blankReading ? (last as keyof NewReadingForm) : 'pieceId'
 }

@@ -63,7 +63,12 @@ function EquipmentOf({ kind, rows, hint }: EquipmentProps) {
   const { t } = useTranslation('readings')
   const form = useFormContext<NewReadingForm>()
   const name = fieldOfKind[kind]
-  const choices = inServiceOf(rows, kind).map(({ id, name: label, details }) => ({
+  // What was in service when it was chosen stays among the choices.
+  const chosenBefore = form.formState.defaultValues?.[name]
+  const offered = rows.filter(
+    (row) => row.details.kind === kind && (row.inService || row.id === chosenBefore),
+  )
+  const choices = offered.map(({ id, name: label, details }) => ({
     value: id,
     label,
     note: details.kind === 'lightSource' ? `${details.wavelengthNm} nm` : undefined,

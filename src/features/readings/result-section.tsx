@@ -3,12 +3,16 @@ import type { Reading } from '@shared/schemas/readings'
 import type { Figure } from '@shared/schemas/results'
 import { formatHeight, formatWithUncertainty } from '@shared/units/height'
 import { isEditable } from '@shared/workflow/reading-states'
+import { useMutation } from '@tanstack/react-query'
 import { useTranslation } from 'react-i18next'
+import { toast } from 'sonner'
+import { Button } from '@/components/button'
 import { EmptyState } from '@/components/empty-state'
 import { Section } from '@/components/section'
 import { ReadingRule } from '@/components/tolerance-rule/reading-rule'
 import { VerdictWords } from '@/components/tolerance-rule/verdict-words'
 import { formatMoment } from '@/lib/format-when'
+import { computeReading } from '@/lib/queries/readings'
 import { useSettings } from '@/lib/settings'
 import { useHeights } from '@/lib/use-heights'
 
@@ -27,6 +31,7 @@ export function ResultSection({ reading }: { reading: Reading }) {
           <FigureTable figure={figure} />
         </div>
       )}
+      {reading.figureIsStale && <StaleFigure reading={reading} />}
       {result && (
         <p className="mt-4 text-axis text-muted">
           {t('page.result.engine', {
@@ -37,6 +42,24 @@ export function ResultSection({ reading }: { reading: Reading }) {
         </p>
       )}
     </Section>
+  )
+}
+
+function StaleFigure({ reading: { id, mayEdit } }: { reading: Reading }) {
+  const { t } = useTranslation('readings')
+  const compute = useMutation({
+    mutationFn: () => computeReading(id),
+    onError: (error) => toast.error(error.message),
+  })
+  return (
+    <div role="status" className="mt-4 flex flex-wrap items-center gap-4">
+      <p className="text-chestnut">{t('page.result.stale')}</p>
+      {mayEdit && (
+        <Button disabled={compute.isPending} onClick={() => compute.mutate()}>
+          {t('page.result.again')}
+        </Button>
+      )}
+    </div>
   )
 }
 

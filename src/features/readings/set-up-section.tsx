@@ -1,12 +1,19 @@
 import type { Equipment } from '@shared/schemas/equipment'
 import type { Reading } from '@shared/schemas/readings'
 import { formatHeight } from '@shared/units/height'
+import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Facts } from '@/components/facts'
 import { Section } from '@/components/section'
 import { useEquipment } from '@/lib/queries/equipment'
 
-export function SetUpSection({ reading: { setUp } }: { reading: Reading }) {
+interface Props {
+  reading: Reading
+  /** Opens the change of set-up and conditions, for who may. */
+  change?: ReactNode
+}
+
+export function SetUpSection({ reading: { setUp }, change }: Props) {
   const { t } = useTranslation('readings')
   const equipment = useEquipment()
   const named = (id: string | null) => nameOf(equipment.data?.rows ?? [], id) ?? t('common:notStated')
@@ -16,7 +23,7 @@ export function SetUpSection({ reading: { setUp } }: { reading: Reading }) {
       : `${setUp.viewingAngleDeg}°${setUp.viewingAngleUDeg === null ? '' : ` ± ${setUp.viewingAngleUDeg}°`}`
   return (
     <Section title={t('page.setUp.title')}>
-      <div className="pt-3">
+      <div className="flex flex-wrap items-start justify-between gap-4 pt-3">
         <Facts
           facts={[
             { name: t('page.setUp.lightSource'), value: named(setUp.lightSourceId) },
@@ -27,6 +34,7 @@ export function SetUpSection({ reading: { setUp } }: { reading: Reading }) {
             { name: t('page.setUp.mirrored'), value: t(setUp.mirrored ? 'page.setUp.yes' : 'page.setUp.no') },
           ]}
         />
+        {change}
       </div>
     </Section>
   )
@@ -58,6 +66,19 @@ export function ConditionsSection({ reading: { conditions } }: { reading: Readin
             { name: t('page.conditions.gradient'), value: stated(conditions.temperatureHalfWidthUm, um) },
             { name: t('page.conditions.gap'), value: stated(conditions.meanGapUm, um) },
             { name: t('page.conditions.support'), value: stated(conditions.supportHalfWidthUm, um) },
+            {
+              name: t('page.conditions.placement'),
+              value: stated(conditions.edgePlacementUMm, (value) => `${value} mm`),
+            },
+            {
+              name: t('page.conditions.repeats'),
+              value: conditions.repeats
+                ? t('page.conditions.repeatsValue', {
+                    spread: um(conditions.repeats.standardDeviationUm),
+                    count: conditions.repeats.count,
+                  })
+                : t('common:notStated'),
+            },
           ]}
         />
         {conditions.note && <p className="mt-3 max-w-[70ch] whitespace-pre-line">{conditions.note}</p>}

@@ -1,3 +1,4 @@
+import { engineSetUp } from '@shared/metrology'
 import type { Equipment } from '@shared/schemas/equipment'
 import type { Reading } from '@shared/schemas/readings'
 import { useEffect, useMemo, useState } from 'react'
@@ -5,7 +6,6 @@ import { useTranslation } from 'react-i18next'
 import { toast } from 'sonner'
 import { Desk } from './desk'
 import { openTable } from './open-table'
-import { engineSetUp } from './result/engine-set-up'
 import type { Circumstances } from './result/read-marks'
 import { setUpWords } from './set-up-words'
 import { TableProvider } from './table-store'
@@ -36,7 +36,7 @@ export function TracingTable({ reading, equipment }: Props) {
 }
 
 function circumstancesOf(reading: Reading, equipment: readonly Equipment[]): Circumstances {
-  const setUp = engineSetUp(reading, equipment)
+  const setUp = engineSetUp(reading, (id) => equipment.find((item) => item.id === id)?.details ?? null)
   if (!setUp) return null
   const photo = reading.photos.find(({ role }) => role === 'bands') ?? null
   return { size: reading.face.size, photo, setUp, mirrored: reading.setUp.mirrored }

@@ -1,6 +1,7 @@
 import { eventListSchema } from '@shared/schemas/events'
 import { homeSchema } from '@shared/schemas/home'
 import { type NewReading, readingListSchema, readingSchema } from '@shared/schemas/readings'
+import { readingResultSchema } from '@shared/schemas/results'
 import { useInfiniteQuery, useQuery } from '@tanstack/react-query'
 import { api, queryString } from '../api-client'
 import { queryClient } from '../query-client'
@@ -40,6 +41,22 @@ export async function startReading(reading: NewReading) {
   queryClient.setQueryData(queryKeys.reading(started.id), started)
   refreshReadings()
   return started
+}
+
+/** Changes set-up and conditions; the figure is another one then. */
+export async function changeReading(id: string, change: Pick<NewReading, 'setUp' | 'conditions'>) {
+  const changed = await api('PATCH', `/readings/${id}`, readingSchema, { body: change })
+  queryClient.setQueryData(queryKeys.reading(id), changed)
+  refreshReadings()
+  return changed
+}
+
+/** The server reads the saved marks anew. */
+export async function computeReading(id: string) {
+  const result = await api('POST', `/readings/${id}/compute`, readingResultSchema)
+  await queryClient.invalidateQueries({ queryKey: queryKeys.reading(id) })
+  refreshReadings()
+  return result
 }
 
 /** What shows readings is asked again: the lists, Home, and the piece. */
