@@ -147,6 +147,26 @@ describe('the places at which figures are taken', () => {
   })
 })
 
+describe('the area under strong perspective', () => {
+  it('is that of the drawing, however differently near and far are seen', () => {
+    const trapezoid: Face = {
+      outline: {
+        kind: 'polygon',
+        points: [
+          [199.5, 300],
+          [1399.5, 100],
+          [1399.5, 1100],
+          [199.5, 800],
+        ],
+      },
+      size: { kind: 'block', widthMm: 40, heightMm: 30 },
+      exclusions: [],
+      edgeBandMm: 0,
+    }
+    expect(areaOf(trapezoid).areaMm2 / 1200).toBeCloseTo(1, 3)
+  })
+})
+
 describe('the share of each cell of the map', () => {
   it('adds up to the measured area, finer than a count of cells', () => {
     const area = areaOf(disc)

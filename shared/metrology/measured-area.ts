@@ -13,7 +13,8 @@ import {
 } from './row-spans'
 import type { TracedReading } from './types'
 
-type Places = readonly (readonly [number, number])[]
+type Place = readonly [number, number]
+type Places = readonly Place[]
 
 /** The measured area of one photograph: the pixels inside the outline, less edge band, less leave-outs. */
 export interface MeasuredArea {
@@ -147,17 +148,27 @@ function unit(from: readonly [number, number], to: readonly [number, number]): r
   return [(to[0] - from[0]) / length, (to[1] - from[1]) / length]
 }
 
+/** A homography keeps straight lines straight, so that a row of pixels is a quadrangle on the part as well. */
 function areaOf(pixels: RowSpans, frame: PartFrame): number {
   let area = 0
   pixels.rows.forEach((spans, i) => {
     const y = pixels.firstRow + i
     for (let k = 0; k < spans.length; k += 2) {
-      const count = spans[k + 1]! - spans[k]! + 1
-      const scale = frame.mmPerPx((spans[k]! + spans[k + 1]!) / 2, y)
-      area += count * scale * scale
+      const [left, right] = [spans[k]! - 0.5, spans[k + 1]! + 0.5]
+      area += quadrangleArea(
+        frame.toMm(left, y - 0.5),
+        frame.toMm(right, y - 0.5),
+        frame.toMm(right, y + 0.5),
+        frame.toMm(left, y + 0.5),
+      )
     }
   })
   return area
+}
+
+/** Half the cross product of its diagonals. */
+function quadrangleArea(a: Place, b: Place, c: Place, d: Place): number {
+  return Math.abs((c[0] - a[0]) * (d[1] - b[1]) - (c[1] - a[1]) * (d[0] - b[0])) / 2
 }
 
 /**
