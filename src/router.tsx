@@ -7,6 +7,12 @@ import { ShellLayout } from './pages/shell-layout'
 /** Each page is a bundle of its own, loaded when it is first opened. */
 export const router = createBrowserRouter([
   {
+    path: '/check/:code?',
+    ErrorBoundary: RouteErrorPage,
+    HydrateFallback: () => null,
+    lazy: async () => ({ Component: (await import('./pages/check-page')).CheckPage }),
+  },
+  {
     Component: SessionGate,
     ErrorBoundary: RouteErrorPage,
     HydrateFallback: () => null,
@@ -15,6 +21,13 @@ export const router = createBrowserRouter([
         path: '/readings/:id/table',
         ErrorBoundary: RouteErrorPage,
         lazy: async () => ({ Component: (await import('@/features/tracing/tracing-page')).default }),
+      },
+      {
+        path: '/certificates/:id/print',
+        ErrorBoundary: RouteErrorPage,
+        lazy: async () => ({
+          Component: (await import('./pages/certificate-print-page')).CertificatePrintPage,
+        }),
       },
       {
         Component: ShellLayout,
@@ -37,6 +50,24 @@ export const router = createBrowserRouter([
               {
                 path: 'readings/:id',
                 lazy: async () => ({ Component: (await import('./pages/reading-page')).ReadingPage }),
+              },
+              {
+                path: 'review',
+                lazy: async () => ({ Component: (await import('./pages/review-page')).ReviewPage }),
+              },
+              {
+                path: 'review/:id',
+                lazy: async () => ({ Component: (await import('./pages/review-desk-page')).ReviewDeskPage }),
+              },
+              {
+                path: 'certificates',
+                lazy: async () => ({
+                  Component: (await import('./pages/certificates-page')).CertificatesPage,
+                }),
+              },
+              {
+                path: 'certificates/:id',
+                lazy: async () => ({ Component: (await import('./pages/certificate-page')).CertificatePage }),
               },
               {
                 path: 'pieces',

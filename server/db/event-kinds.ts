@@ -27,6 +27,13 @@ export const eventKinds = [
   'reading.agreed',
   'reading.setAside',
   'reading.certified',
+  'remark.added',
+  'remark.answered',
+  'remark.closed',
+  'piece.disposed',
+  'certificate.issued',
+  'certificate.withdrawn',
+  'certificate.replaced',
 ] as const
 export type EventKind = (typeof eventKinds)[number]
 
@@ -40,5 +47,6 @@ export const eventSubjects = [
   'piece',
   'equipment',
   'reading',
+  'certificate',
 ] as const
 export type EventSubject = (typeof eventSubjects)[number]

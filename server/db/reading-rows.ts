@@ -1,6 +1,6 @@
 import type { ReadingRow } from '@shared/schemas/readings'
 import { isEditable } from '@shared/workflow/reading-states'
-import { desc, eq, type SQL, sql } from 'drizzle-orm'
+import { count, desc, eq, type SQL, sql } from 'drizzle-orm'
 import type { Connection } from './client'
 import type { PageMark } from './paging'
 import { toFace } from './parts'
@@ -98,6 +98,16 @@ export function selectLatestByPiece(db: Connection, pieceIds: readonly string[])
   )`
   const rows = selectReadingRows(db, { where: sql`${readings.id} IN ${latestIds}` })
   return new Map(rows.map((row) => [row.pieceId, row]))
+}
+
+/** How many readings match, without opening what they are joined with. */
+export function countReadings(db: Connection, where: SQL | undefined): number {
+  return db.select({ total: count() }).from(readings).where(where).get()?.total ?? 0
+}
+
+/** Rows that come after the one that `before` names, in the order oldest first. */
+export function newerThan(before: PageMark): SQL {
+  return sql`(${readings.createdAt}, ${readings.id}) > (${before.createdAt}, ${before.id})`
 }
 
 /** Rows that come after the one that `before` names, in the order newest first. */

@@ -13,6 +13,9 @@ const firstSettings: Settings = {
   displayUnit: 'um',
   allowPlainNetwork: false,
   onePersonShop: false,
+  certificatePrefix: 'FC',
+  procedure: '',
+  publicAddress: '',
   leastSupportedShare: 0.9,
 }
 

@@ -1,5 +1,6 @@
 import type { AppContext } from '../context'
 import type { ApiRouter } from './api-router'
+import { certificatesRouter } from './certificates'
 import { customersRouter } from './customers'
 import { equipmentRouter } from './equipment'
 import { eventsRouter } from './events'
@@ -11,6 +12,7 @@ import { peopleRouter } from './people'
 import { photosRouter } from './photos'
 import { piecesRouter } from './pieces'
 import { readingsRouter } from './readings'
+import { reviewsRouter } from './reviews'
 import { searchRouter } from './search'
 import { sessionRouter } from './session'
 import { settingsRouter } from './settings'
@@ -28,6 +30,8 @@ export function apiRouters(context: AppContext): ApiRouter[] {
     piecesRouter(context),
     equipmentRouter(context),
     readingsRouter(context),
+    reviewsRouter(context),
+    certificatesRouter(context),
     photosRouter(context),
     homeRouter(context),
     searchRouter(context),

@@ -4,11 +4,13 @@ import {
   readingListQuerySchema,
   saveMarksSchema,
 } from '@shared/schemas/readings'
+import { sendReadingSchema } from '@shared/schemas/reviews'
 import { z } from 'zod'
 import { requireActor } from '../auth/actor'
 import type { AppContext } from '../context'
 import { drawMap } from '../storage/map-picture'
 import { changeReading } from '../use-cases/readings/change-reading'
+import { exportReadings } from '../use-cases/readings/export-readings'
 import { listReadings } from '../use-cases/readings/list-readings'
 import { reopenReading } from '../use-cases/readings/reopen-reading'
 import { saveMarks } from '../use-cases/readings/save-marks'
@@ -19,6 +21,7 @@ import { computeResult } from '../use-cases/results/compute-result'
 import { findMap } from '../use-cases/results/find-map'
 import { ApiRouter } from './api-router'
 import { parseInput } from './parse'
+import { sendCsv } from './send-csv'
 
 const mapQuerySchema = z.object({ size: z.coerce.number().int().min(16).max(1024).default(256) })
 
@@ -28,6 +31,11 @@ export function readingsRouter(context: AppContext): ApiRouter {
   api.get('/readings', 'shop:read', (request, response) => {
     const query = parseInput(readingListQuerySchema, request.query)
     response.json(listReadings(context, requireActor(request), query))
+  })
+
+  api.get('/readings.csv', 'shop:read', (request, response) => {
+    const query = parseInput(readingListQuerySchema, request.query)
+    sendCsv(response, 'readings', exportReadings(context, requireActor(request), query))
   })
 
   api.post('/readings', 'reading:create', (request, response) => {
@@ -54,7 +62,8 @@ export function readingsRouter(context: AppContext): ApiRouter {
   })
 
   api.post('/readings/:id/send', 'reading:send-own', (request, response) => {
-    response.json(sendReading(context, requireActor(request), request.params.id))
+    const input = parseInput(sendReadingSchema, request.body)
+    response.json(sendReading(context, requireActor(request), request.params.id, input))
   })
 
   api.post('/readings/:id/reopen', 'reading:send-own', (request, response) => {

@@ -6,7 +6,7 @@ export type DemoProgress =
   | { kind: 'partlyTraced' }
   | { kind: 'computed' }
   | { kind: 'sent' }
-  | { kind: 'agreed' }
+  | { kind: 'agreed'; remark?: { text: string; answer: string; onTrace: number } }
   | { kind: 'sentBack'; reason: string; remark: string; onTrace: number }
   | { kind: 'setAside'; cause: string }
 
@@ -20,6 +20,8 @@ export interface DemoReading extends DemoPhoto {
   soakMinutes: number
   /** Takes the place of the piece's earlier reading, which was set aside. */
   corrects?: true
+  /** The piece was on the lap since its reading before. */
+  lappedSince?: true
 }
 
 const agreed: DemoProgress = { kind: 'agreed' }
@@ -61,6 +63,7 @@ export const demoReadings: DemoReading[] = [
     daysAgo: 11,
     time: '09:20',
     progress: agreed,
+    lappedSince: true,
     note: 'After 20 minutes on the lap.',
     soakMinutes: 60,
     seed: 32,
@@ -75,6 +78,7 @@ export const demoReadings: DemoReading[] = [
     daysAgo: 10,
     time: '08:40',
     progress: agreed,
+    lappedSince: true,
     note: 'After another 15 minutes on the lap.',
     soakMinutes: 75,
     seed: 33,
@@ -141,7 +145,14 @@ export const demoReadings: DemoReading[] = [
     daysAgo: 7,
     time: '08:25',
     takenBy: 'Maren Oldacre',
-    progress: agreed,
+    progress: {
+      kind: 'agreed',
+      remark: {
+        text: 'Does this band end at the bore, or does it go on behind the glare?',
+        answer: 'It ends there: the second photograph, with the lamp moved, shows the same.',
+        onTrace: 4,
+      },
+    },
     note: 'Saddle seen by eye as well.',
     soakMinutes: 45,
     seed: 12,

@@ -13,6 +13,7 @@ import { createDemoClock } from './demo-clock'
 import { demoEquipment } from './demo-equipment'
 import { type DemoPart, demoCustomers, demoParts } from './demo-parts'
 import { demoSignIns } from './demo-people'
+import { seedCertificates } from './seed-certificates'
 import { type DemoShop, seedReadings } from './seed-readings'
 
 const openedDaysAgo = 21
@@ -22,14 +23,30 @@ export async function seedDemoShop(live: AppContext): Promise<void> {
   const clock = createDemoClock(live.now())
   const context: AppContext = { ...live, now: clock.now }
   clock.moveTo(openedDaysAgo, '07:30')
-  changeSettings(context, null, { shopName: 'Quillmere Lapping Works' })
+  changeSettings(context, null, {
+    shopName: 'Quillmere Lapping Works',
+    shopAddress: '4 Staithe Row, Quillmere QM3 7LP',
+    shopEmail: 'flatness@quillmere.example',
+    certificatePrefix: 'QL',
+    procedure: 'LP 12, flatness by optical flat',
+    publicAddress: 'https://lapwing.quillmere.example',
+  })
   const people = await seedPeople(context)
   // The first of them enters the rest.
   const [actor] = people
   const equipment = demoEquipment.map((item) => addEquipment(context, actor, item))
   const customers = demoCustomers.map((customer) => addCustomer(context, actor, customer))
   const pieces = demoParts.flatMap((part) => seedPart(context, actor, customers, part))
-  await seedReadings(context, clock, { people, equipment, pieces })
+  const agreed = await seedReadings(context, clock, { people, equipment, pieces })
+  const qa = requirePerson(people, 'Ines Calloway')
+  const reviewer = requirePerson(people, 'Tobias Fenwright')
+  await seedCertificates(context, clock, { qa, reviewer }, agreed)
+}
+
+function requirePerson(people: readonly Actor[], name: string): Actor {
+  const person = people.find((candidate) => candidate.name === name)
+  if (!person) throw new Error(`The demo shop has no ${name}.`)
+  return person
 }
 
 async function seedPeople(context: AppContext): Promise<Actor[]> {

@@ -17,6 +17,7 @@ import { demoMarks, partlyTraced } from './demo-marks'
 import { type DemoProgress, type DemoReading, demoReadings } from './demo-readings'
 import { type DemoReview, reviewDemoReading } from './demo-reviews'
 import { demoScene } from './demo-scene'
+import type { AgreedReading } from './seed-certificates'
 
 const minutesToPhotograph = 4
 const minutesToTrace = 25
@@ -30,14 +31,23 @@ export interface DemoShop {
   pieces: readonly (Piece & { faceId: string })[]
 }
 
-/** Drawn photographs, traced and computed as an inspector would, one after the other. */
-export async function seedReadings(context: AppContext, clock: DemoClock, shop: DemoShop): Promise<void> {
+/** Drawn photographs, traced and computed as an inspector would, one after the other; those that were agreed to. */
+export async function seedReadings(
+  context: AppContext,
+  clock: DemoClock,
+  shop: DemoShop,
+): Promise<AgreedReading[]> {
   const latestOfPiece = new Map<string, string>()
+  const agreed: AgreedReading[] = []
   for (const demo of demoReadings) {
     clock.moveTo(demo.daysAgo, demo.time)
     const correctsId = demo.corrects ? (latestOfPiece.get(demo.serial) ?? null) : null
-    latestOfPiece.set(demo.serial, await seedReading(context, clock, shop, demo, correctsId))
+    const id = await seedReading(context, clock, shop, demo, correctsId)
+    latestOfPiece.set(demo.serial, id)
+    const { serial } = demo
+    if (demo.progress.kind === 'agreed') agreed.push({ id, serial, pieceId: requirePieceOf(shop, demo).id })
   }
+  return agreed
 }
 
 async function seedReading(
@@ -56,6 +66,7 @@ async function seedReading(
     setUp,
     conditions: conditionsOf(demo),
     correctsId,
+    lappedSince: demo.lappedSince ?? false,
   })
 
   const scene = demoScene(demo)
@@ -77,7 +88,8 @@ async function seedReading(
   const review = reviewOf(demo.progress, marks)
   if (review) {
     clock.pass(minutesToReview)
-    reviewDemoReading(context, requireNamed(shop.people, 'Tobias Fenwright'), id, review)
+    const reviewer = requireNamed(shop.people, 'Tobias Fenwright')
+    reviewDemoReading(context, { reviewer, taker: actor }, id, review)
   }
   return id
 }
@@ -90,7 +102,12 @@ async function photograph(context: AppContext, actor: Actor, id: string, scene: 
 function reviewOf(progress: DemoProgress, marks: Marks): DemoReview | null {
   switch (progress.kind) {
     case 'agreed':
-      return { kind: 'agreed' }
+      return progress.remark
+        ? {
+            kind: 'agreed',
+            remark: { ...progress.remark, place: middleOfTrace(marks, progress.remark.onTrace) },
+          }
+        : { kind: 'agreed' }
     case 'setAside':
       return progress
     case 'sentBack': {

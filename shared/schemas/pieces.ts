@@ -1,6 +1,8 @@
 import { z } from 'zod'
+import { certificateRowSchema } from './certificates'
 import { faceSchema, lotSchema, partRowSchema, partSchema, pieceSchema } from './parts'
 import { readingRowSchema } from './readings'
+import { dispositionSchema } from './reviews'
 
 /** A piece with its latest reading that isn't set aside. */
 export const pieceRowSchema = pieceSchema.extend({ latest: readingRowSchema.nullable() })
@@ -22,6 +24,10 @@ export const piecePageSchema = z.object({
   faces: z.array(faceSchema),
   /** Oldest first. */
   readings: z.array(readingRowSchema),
+  /** Newest first: the first one counts. */
+  dispositions: z.array(dispositionSchema),
+  /** Newest first. */
+  certificates: z.array(certificateRowSchema),
 })
 export type PiecePage = z.infer<typeof piecePageSchema>
 

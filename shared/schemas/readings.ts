@@ -1,8 +1,9 @@
 import { z } from 'zod'
 import { readingStateSchema } from '../workflow/reading-states'
+import { daySchema } from './equipment'
 import { marksSchema } from './marks'
 import { faceSchema, pieceSchema } from './parts'
-import { readingResultSchema, resultSummarySchema } from './results'
+import { readingResultSchema, resultSummarySchema, verdictSchema } from './results'
 
 /** What the photograph was taken with. `null` is "not stated". */
 export const setUpSchema = z.object({
@@ -54,6 +55,8 @@ export const newReadingSchema = z.object({
   conditions: conditionsSchema,
   /** The reading that this one corrects. */
   correctsId: z.string().nullable().default(null),
+  /** The piece was lapped since the reading before, so that earlier ones count no more. */
+  lappedSince: z.boolean().default(false),
 })
 export type NewReading = z.infer<typeof newReadingSchema>
 
@@ -119,11 +122,23 @@ export const readingListQuerySchema = z.object({
   mine: z.enum(['true', 'false']).optional(),
   pieceId: z.string().optional(),
   search: z.string().max(100).optional(),
+  customerId: z.string().max(40).optional(),
+  verdict: verdictSchema.optional(),
+  /** Calendar days on which readings were started, both included. */
+  from: daySchema.optional(),
+  to: daySchema.optional(),
+  order: z.enum(['newest', 'oldest']).default('newest'),
   limit: z.coerce.number().int().min(1).max(200).default(50),
+  /** `next` of the answer before. */
   before: z.string().max(200).optional(),
 })
 export type ReadingListQuery = z.infer<typeof readingListQuerySchema>
-export const readingListSchema = z.object({ rows: z.array(readingRowSchema), next: z.string().nullable() })
+export const readingListSchema = z.object({
+  rows: z.array(readingRowSchema),
+  next: z.string().nullable(),
+  /** How many there are in all. */
+  total: z.number().int(),
+})
 export type ReadingList = z.infer<typeof readingListSchema>
 
 /** Autosave: the marks, and the version that they were edited from. */

@@ -11,6 +11,19 @@ export const settingsSchema = z.object({
   /** Sign-in without TLS allowed (a tablet on the shop's own network); every page then warns. */
   allowPlainNetwork: z.boolean(),
   onePersonShop: z.boolean(),
+  /** Certificates are numbered prefix-year-count. */
+  certificatePrefix: z
+    .string()
+    .trim()
+    .regex(/^[A-Za-z0-9]{1,8}$/, 'settings.certificatePrefix.form'),
+  /** The shop's own procedure for flatness, as certificates name it. */
+  procedure: z.string().trim().max(120),
+  /** Where customers reach this Lapwing, for the code on certificates; empty is where it was issued. */
+  publicAddress: z
+    .string()
+    .trim()
+    .max(200)
+    .regex(/^(https?:\/\/[^\s/]+)?$/, 'settings.publicAddress.form'),
   /** Least share of the measured area that traces must support before a verdict is given, 0 to 1. */
   leastSupportedShare: z.number().min(0.5).max(1),
 })

@@ -12,6 +12,8 @@ import { PageHead } from '@/components/page-head'
 import { useFaceWords } from '@/components/readings/face-words'
 import { PlainReadingLine } from '@/components/readings/plain-reading-line'
 import { Section } from '@/components/section'
+import { CertificatesSection } from '@/features/pieces/certificates-section'
+import { DispositionSection } from '@/features/pieces/disposition-section'
 import { FaceHistory } from '@/features/pieces/face-history'
 import { usePiece } from '@/lib/queries/pieces'
 import { useDocumentTitle } from '@/lib/use-document-title'
@@ -34,6 +36,8 @@ export function PiecePage() {
       {face && (
         <FaceHistory key={face.id} readings={readings.filter((reading) => reading.face.id === face.id)} />
       )}
+      <DispositionSection page={page.data} />
+      <CertificatesSection certificates={page.data.certificates} />
       <Section title={t('page.readings.title')} note={t('page.readings.note')}>
         {readings.length === 0 && <EmptyState>{t('page.readings.empty')}</EmptyState>}
         <ul>

@@ -33,6 +33,7 @@ const promised = `
   POST   /equipment                     equipment:edit
   PATCH  /equipment/:id                 equipment:edit
   GET    /readings                      shop:read
+  GET    /readings.csv                  shop:read
   POST   /readings                      reading:create
   GET    /readings/:id                  shop:read
   PATCH  /readings/:id                  reading:edit-own
@@ -41,6 +42,22 @@ const promised = `
   POST   /readings/:id/send             reading:send-own
   POST   /readings/:id/reopen           reading:send-own
   GET    /readings/:id/map.png          shop:read
+  GET    /readings/:id/review           shop:read
+  POST   /readings/:id/agree            reading:review
+  POST   /readings/:id/send-back        reading:review
+  POST   /readings/:id/set-aside        reading:set-aside
+  POST   /readings/:id/remarks          reading:review
+  POST   /remarks/:id/answers           remark:answer
+  POST   /remarks/:id/close             reading:review
+  POST   /pieces/:id/dispositions       piece:dispose
+  GET    /certificates                  shop:read
+  GET    /certificates.csv              shop:read
+  GET    /certificates/:id              shop:read
+  GET    /certificates/:id/page         shop:read
+  GET    /certificates/:id/pdf          shop:read
+  POST   /readings/:id/certificate      certificate:issue
+  POST   /certificates/:id/withdraw     certificate:issue
+  GET    /check/:code                   anyone
   POST   /readings/:id/photos           photo:upload
   DELETE /readings/:id/photos/:photoId  photo:upload
   GET    /photos/:sha256/preview        shop:read

@@ -1,6 +1,6 @@
 import type { NewEquipment } from '@shared/schemas/equipment'
 import { emptyMarks, type Marks, type Trace } from '@shared/schemas/marks'
-import type { Conditions, Reading, ReadingSetUp } from '@shared/schemas/readings'
+import type { Conditions, NewReading, Reading, ReadingSetUp } from '@shared/schemas/readings'
 import { addEquipment } from '../../server/use-cases/equipment/add-equipment'
 import { storePiece } from './stored-readings'
 import { type SignedIn, startTestApp, type TestApp } from './support'
@@ -70,8 +70,15 @@ export function newReading({ pieceId, faceId, lightSourceId }: Bench) {
 }
 
 /** A new draft by the inspector, or by whoever is given. */
-export async function takeReading(bench: Bench, by: SignedIn = bench.inspector): Promise<Reading> {
-  const response = await by.agent.post('/api/readings').send(newReading(bench)).expect(201)
+export async function takeReading(
+  bench: Bench,
+  by: SignedIn = bench.inspector,
+  more: Partial<NewReading> = {},
+): Promise<Reading> {
+  const response = await by.agent
+    .post('/api/readings')
+    .send({ ...newReading(bench), ...more })
+    .expect(201)
   return response.body
 }
 
@@ -102,17 +109,25 @@ function bowedTrace(order: number, bowBands: number): Trace {
 }
 
 /** Saves marks on top of those that are there. */
-export async function mark(bench: Bench, reading: Reading, marks: Marks, version = 0): Promise<void> {
-  await bench.inspector.agent
-    .put(`/api/readings/${reading.id}/marks`)
-    .send({ basedOnVersion: version, marks })
-    .expect(200)
+export async function mark(
+  bench: Bench,
+  reading: Reading,
+  marks: Marks,
+  version = 0,
+  by: SignedIn = bench.inspector,
+): Promise<void> {
+  await by.agent.put(`/api/readings/${reading.id}/marks`).send({ basedOnVersion: version, marks }).expect(200)
 }
 
 /** A reading with bands on it and its figure computed. */
-export async function takeMeasuredReading(bench: Bench, bowBands = 1): Promise<Reading> {
-  const reading = await takeReading(bench)
-  await mark(bench, reading, bowedMarks(bowBands))
-  await bench.inspector.agent.post(`/api/readings/${reading.id}/compute`).expect(200)
-  return (await bench.inspector.agent.get(`/api/readings/${reading.id}`).expect(200)).body
+export async function takeMeasuredReading(
+  bench: Bench,
+  bowBands = 1,
+  by: SignedIn = bench.inspector,
+  more: Partial<NewReading> = {},
+): Promise<Reading> {
+  const reading = await takeReading(bench, by, more)
+  await mark(bench, reading, bowedMarks(bowBands), 0, by)
+  await by.agent.post(`/api/readings/${reading.id}/compute`).expect(200)
+  return (await by.agent.get(`/api/readings/${reading.id}`).expect(200)).body
 }

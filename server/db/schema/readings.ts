@@ -29,6 +29,12 @@ export const readings = sqliteTable(
     sentBackReason: text('sent_back_reason'),
     setAsideCause: text('set_aside_cause'),
     sentAt: text('sent_at'),
+    /** Why leave-outs or edge band differ from the drawing's; null while they don't. */
+    departureReason: text('departure_reason'),
+    /** The piece was lapped since the reading before: earlier ones count no more. */
+    lappedSince: integer('lapped_since', { mode: 'boolean' }).notNull().default(false),
+    agreedById: text('agreed_by_id').references(() => people.id),
+    agreedAt: text('agreed_at'),
     createdAt: text('created_at').notNull(),
     updatedAt: text('updated_at').notNull(),
     marksVersion: integer('marks_version').notNull().default(0),

@@ -5,6 +5,8 @@ import { requirePart, selectFaces } from '../../db/parts'
 import { requirePiece } from '../../db/pieces'
 import { oldestFirst, selectReadingRows } from '../../db/reading-rows'
 import { readings } from '../../db/schema/readings'
+import { selectCertificatesOfPiece } from '../certificates/select-certificates'
+import { selectDispositions } from '../dispositions/select-dispositions'
 
 /** A piece with its part, its faces, and every reading of it. */
 export function showPiece({ db }: AppContext, id: string): PiecePage {
@@ -14,5 +16,7 @@ export function showPiece({ db }: AppContext, id: string): PiecePage {
     part: requirePart(db, piece.partId),
     faces: selectFaces(db, [piece.partId]),
     readings: selectReadingRows(db, { where: eq(readings.pieceId, id), orderBy: oldestFirst }),
+    dispositions: selectDispositions(db, id),
+    certificates: selectCertificatesOfPiece(db, id),
   }
 }

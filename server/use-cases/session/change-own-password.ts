@@ -1,13 +1,12 @@
 import type { OwnPasswordChange } from '@shared/schemas/people'
 import { eq } from 'drizzle-orm'
 import type { Actor } from '../../auth/actor'
-import { beginAttempt, succeedAttempt } from '../../auth/attempts'
+import { confirmPassword } from '../../auth/confirm-password'
 import { endSessions } from '../../auth/end-sessions'
 import type { AppContext } from '../../context'
 import { inTransaction } from '../../db/client'
 import { recordEvent } from '../../db/events'
 import { people } from '../../db/schema/people'
-import { invalidField, notFound } from '../../errors'
 
 export interface OwnSession {
   token: string
@@ -22,14 +21,7 @@ export async function changeOwnPassword(
   session: OwnSession,
 ): Promise<void> {
   const { db, auth, now } = context
-  const person = db.select().from(people).where(eq(people.id, actor.id)).get()
-  if (!person) throw notFound('person')
-  const attempt = { account: person.email, address: session.address, at: now() }
-  beginAttempt(db, attempt)
-  if (!(await auth.passwords.verify(person.passwordHash, current))) {
-    throw invalidField('current', { key: 'people.password.wrong' })
-  }
-  succeedAttempt(db, attempt)
+  await confirmPassword(context, actor, { password: current, address: session.address, field: 'current' })
 
   const passwordHash = await auth.passwords.hash(next)
   inTransaction(db, (tx) => {

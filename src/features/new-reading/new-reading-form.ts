@@ -7,6 +7,7 @@ import { candidateResolver } from '@/lib/candidate-resolver'
 export interface NewReadingForm {
   pieceId: string
   faceId: string
+  lappedSince: boolean
   lightSourceId: string
   referenceFlatId: string
   cameraSetUpId: string
@@ -29,6 +30,7 @@ export interface NewReadingForm {
 export const blankReading: NewReadingForm = {
   pieceId: '',
   faceId: '',
+  lappedSince: false,
   lightSourceId: '',
   referenceFlatId: '',
   cameraSetUpId: '',
@@ -62,6 +64,7 @@ function candidateOf(form: NewReadingForm): unknown {
   return {
     pieceId: form.pieceId,
     faceId: form.faceId,
+    lappedSince: form.lappedSince,
     setUp: {
       lightSourceId: form.lightSourceId || null,
       referenceFlatId: form.referenceFlatId || null,
@@ -96,6 +99,7 @@ export function formOf({ pieceId, face, setUp, conditions }: Reading): NewReadin
   return {
     pieceId,
     faceId: face.id,
+    lappedSince: false,
     lightSourceId: setUp.lightSourceId ?? '',
     referenceFlatId: setUp.referenceFlatId ?? '',
     cameraSetUpId: setUp.cameraSetUpId ?? '',

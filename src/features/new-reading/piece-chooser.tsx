@@ -4,6 +4,7 @@ import { useFormContext } from 'react-hook-form'
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
 import { Button } from '@/components/button'
+import { CheckboxField } from '@/components/fields/checkbox-field'
 import { SelectField } from '@/components/fields/select-field'
 import { TextField } from '@/components/fields/text-field'
 import { useFaceWords } from '@/components/readings/face-words'
@@ -141,6 +142,14 @@ function ChosenPiece({ pieceId, onChange }: { pieceId: string; onChange: () => v
           onChange={(id) => form.setValue('faceId', id, { shouldValidate: form.formState.isSubmitted })}
           error={errorText(t, form.formState.errors.faceId)}
           className="w-96"
+        />
+      )}
+      {page.data?.readings.some(({ face }) => face.id === faceId) && (
+        <CheckboxField
+          label={t('new.piece.lapped')}
+          hint={t('new.piece.lappedHint')}
+          checked={form.watch('lappedSince')}
+          onChange={(checked) => form.setValue('lappedSince', checked)}
         />
       )}
     </div>

@@ -1,21 +1,27 @@
 import { type Reading, readingSchema } from '@shared/schemas/readings'
+import { departuresFromFace } from '@shared/workflow/template-departures'
 import { useMutation } from '@tanstack/react-query'
+import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
 import { toast } from 'sonner'
 import { Button } from '@/components/button'
+import { DepartureDialog } from '@/components/departure-dialog'
 import { api } from '@/lib/api-client'
 import { refreshReadings } from '@/lib/queries/readings'
+import { sendReading } from '@/lib/queries/reviews'
 
 /** What the one who took it may do with a reading as it stands. */
 export function ReadingActions({ reading }: { reading: Reading }) {
   const { t } = useTranslation('readings')
   const move = useMove(reading.id)
-  const { id, mayEdit, maySend, state, photos } = reading
+  const [asking, setAsking] = useState(false)
+  const { id, mayEdit, maySend, state, photos, face, marks } = reading
+  const departs = departuresFromFace(face, marks).length > 0
   return (
     <>
       {maySend && (
-        <Button disabled={move.isPending} onClick={() => move.mutate('send')}>
+        <Button disabled={move.isPending} onClick={() => (departs ? setAsking(true) : move.mutate('send'))}>
           {t('page.send')}
         </Button>
       )}
@@ -23,6 +29,15 @@ export function ReadingActions({ reading }: { reading: Reading }) {
         <Button disabled={move.isPending} onClick={() => move.mutate('reopen')}>
           {t('page.reopen')}
         </Button>
+      )}
+      {asking && (
+        <DepartureDialog
+          onSubmit={async (reason) => {
+            await sendReading(id, reason)
+            toast(t('page.sent'))
+          }}
+          onClose={() => setAsking(false)}
+        />
       )}
       {mayEdit && photos.length > 0 && (
         <Button asChild kind="main">

@@ -1,4 +1,5 @@
 import type { Reading } from '@shared/schemas/readings'
+import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
 import { Facts } from '@/components/facts'
@@ -7,7 +8,13 @@ import { useFaceWords } from '@/components/readings/face-words'
 import { formatMoment } from '@/lib/format-when'
 import { ReadingActions } from './reading-actions'
 
-export function ReadingHead({ reading }: { reading: Reading }) {
+interface Props {
+  reading: Reading
+  /** What others than the taker may do, put there by the page. */
+  more?: ReactNode
+}
+
+export function ReadingHead({ reading, more }: Props) {
   const { t } = useTranslation('readings')
   const words = useFaceWords()
   const { number, partNumber, serial, partName, face, sentBackReason, setAsideCause } = reading
@@ -32,7 +39,12 @@ export function ReadingHead({ reading }: { reading: Reading }) {
           </span>
         </span>
       }
-      actions={<ReadingActions reading={reading} />}
+      actions={
+        <>
+          {more}
+          <ReadingActions reading={reading} />
+        </>
+      }
     >
       <div className="mt-3 flex flex-col gap-3">
         <Facts

@@ -49,6 +49,7 @@ export function SettingsForm({ settings }: { settings: Settings }) {
       <form onSubmit={submit} noValidate>
         <ShopFields />
         <ReadingFields />
+        <CertificateFields />
         <NetworkFields />
         <div className="pb-4 desk:pl-margin">
           <FormFoot submitLabel={t('submit')} isBusy={isSubmitting} error={errorText(t, errors.root)} />
@@ -122,6 +123,40 @@ function ReadingFields() {
           )}
         />
         <SwitchOf name="onePersonShop" />
+      </div>
+    </Section>
+  )
+}
+
+function CertificateFields() {
+  const { t } = useTranslation('settings')
+  const { register, formState } = useFormContext<SettingsForm>()
+  const { errors } = formState
+  return (
+    <Section title={t('certificates.title')} note={t('certificates.note')}>
+      <div className={columns}>
+        <TextField
+          label={t('certificatePrefix')}
+          hint={t('certificatePrefixHint')}
+          maxLength={8}
+          error={errorText(t, errors.certificatePrefix)}
+          {...register('certificatePrefix')}
+        />
+        <TextField
+          label={t('procedure')}
+          hint={t('procedureHint')}
+          maxLength={120}
+          error={errorText(t, errors.procedure)}
+          {...register('procedure')}
+        />
+        <TextField
+          label={t('publicAddress')}
+          hint={t('publicAddressHint')}
+          className="col-span-2"
+          maxLength={200}
+          error={errorText(t, errors.publicAddress)}
+          {...register('publicAddress')}
+        />
       </div>
     </Section>
   )

@@ -3,14 +3,18 @@ import { NavLink } from 'react-router-dom'
 import { classNames } from '@/lib/class-names'
 import { useMay } from '@/lib/session'
 
-const everybody = ['home', 'readings', 'pieces', 'parts', 'equipment'] as const
+const before = ['home', 'readings'] as const
+const after = ['certificates', 'pieces', 'parts', 'equipment'] as const
 
 export function Navigation() {
   const { t } = useTranslation('nav')
+  const reviews = useMay('reading:review')
   const managesPeople = useMay('person:manage')
   const editsSettings = useMay('settings:edit')
   const entries = [
-    ...everybody,
+    ...before,
+    ...(reviews ? (['review'] as const) : []),
+    ...after,
     ...(managesPeople ? (['people'] as const) : []),
     ...(editsSettings ? (['settings'] as const) : []),
   ]

@@ -4,6 +4,7 @@ import type { PointPx } from '@shared/schemas/shapes'
 import { isEditable } from '@shared/workflow/reading-states'
 import { useCallback, useMemo, useRef, useState } from 'react'
 import { useTranslation } from 'react-i18next'
+import { DepartureDialog } from '@/components/departure-dialog'
 import { useIsDesk } from '@/lib/use-is-desk'
 import { PhotoStage } from './canvas/photo-stage'
 import { useTablePointer } from './canvas/use-table-pointer'
@@ -88,8 +89,9 @@ export function Desk({ reading, circumstances, setUpWords, overtaken }: Props) {
         setUpWords={setUpWords}
         saving={saving.state}
         isSending={send.isPending}
-        onSend={() => send.mutate()}
+        onSend={send.send}
       />
+      {send.asksReason && <DepartureDialog onSubmit={send.sendWithReason} onClose={send.giveUp} />}
       <ChecklistBar steps={result.steps} isShort={!isDesk} />
       <div className="min-h-0 desk:grid desk:grid-cols-[176px_minmax(0,1fr)_312px]">
         {isDesk && (

@@ -15,6 +15,10 @@ export interface ReadingFilters {
   state?: string
   mine?: 'true'
   search?: string
+  customerId?: string
+  verdict?: string
+  from?: string
+  to?: string
 }
 
 /** Newest first, page after page. */

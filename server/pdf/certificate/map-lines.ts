@@ -1,0 +1,92 @@
+import { contours } from 'd3-contour'
+import { type HeightField, heightField, type StoredMap } from '../height-field'
+import { linePath, type Point } from './paths'
+import { niceStep } from './rule-scale'
+
+/** Lines of a map in cells of its grid, from the grid's top left corner. */
+type Lines = readonly (readonly Point[])[]
+
+/** All lines of a map, found once however often the page is composed. */
+export interface MapSurface {
+  field: HeightField
+  /** Where half of a cell is measured; none on a map of nothing. */
+  rim: Lines
+  unsupported: Lines
+  contours: readonly { valueUm: number; isPlane: boolean; lines: Lines }[]
+}
+
+export interface GridPlace {
+  x: number
+  y: number
+  /** Units per cell. */
+  cell: number
+}
+
+export function mapSurface(map: StoredMap): MapSurface {
+  const field = heightField(map)
+  return {
+    field,
+    rim: outlineOf(field.coverage, field),
+    unsupported: field.unsupported.includes(1) ? outlineOf(field.unsupported, field) : [],
+    contours: contoursOf(field),
+  }
+}
+
+/** Path of lines that stand on the sheet at a place. */
+export function linesPath(lines: Lines, { x, y, cell }: GridPlace, closed = false): string {
+  return lines
+    .map((line) =>
+      linePath(
+        line.map(([column, row]): Point => [x + column * cell, y + row * cell]),
+        closed,
+      ),
+    )
+    .join('')
+}
+
+/** About twelve contours over the heights, in steps of 1, 2 or 5. */
+function contoursOf(field: HeightField): MapSurface['contours'] {
+  const { leastUm, mostUm, columns, rows, heightsUm } = field
+  const step = niceStep((mostUm - leastUm) / 12)
+  const first = Math.ceil(leastUm / step)
+  const last = Math.floor(mostUm / step)
+  const levels = Array.from({ length: Math.max(0, last - first + 1) }, (_, i) => (first + i) * step)
+  const onEdge = ([x, y]: number[]) => x <= 0 || y <= 0 || x >= columns || y >= rows
+  return contours()
+    .size([columns, rows])
+    .thresholds(levels)(Array.from(heightsUm))
+    .map(({ value, coordinates }) => ({
+      valueUm: value,
+      isPlane: Math.abs(value) < step / 2,
+      lines: coordinates.flat().flatMap((ring) => partsOff(ring, onEdge)),
+    }))
+}
+
+/** d3-contour closes its rings along the grid's edge; those stretches are no contour. */
+function partsOff(ring: number[][], onEdge: (place: number[]) => boolean): Point[][] {
+  const parts: Point[][] = [[]]
+  ring.forEach((place, i) => {
+    if (i > 0 && onEdge(place) && onEdge(ring[i - 1])) parts.push([])
+    parts[parts.length - 1].push([place[0], place[1]])
+  })
+  return parts.filter(({ length }) => length > 1)
+}
+
+/** So that an outline that touches the grid's edge closes. */
+const pad = 1
+
+/** Where the share of cells, 0 to 1, passes one half. */
+function outlineOf(shares: ArrayLike<number>, { columns, rows }: HeightField): Point[][] {
+  const width = columns + 2 * pad
+  const height = rows + 2 * pad
+  const padded = new Array<number>(width * height).fill(0)
+  for (let row = 0; row < rows; row += 1) {
+    for (let column = 0; column < columns; column += 1) {
+      padded[(row + pad) * width + column + pad] = shares[row * columns + column]
+    }
+  }
+  const [outline] = contours().size([width, height]).thresholds([0.5])(padded)
+  return outline.coordinates
+    .flat()
+    .map((ring) => ring.slice(0, -1).map(([x, y]): Point => [x - pad, y - pad]))
+}

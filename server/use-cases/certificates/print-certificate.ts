@@ -1,0 +1,36 @@
+import { readFile } from 'node:fs/promises'
+import type { CertificateSnapshot } from '@shared/schemas/certificates'
+import type { PageDescription } from '@shared/schemas/page-description'
+import type { AppContext } from '../../context'
+import { layoutCertificate } from '../../pdf/certificate-page'
+import { drawMapColours } from '../../pdf/map-colours'
+import { createMeasure } from '../../pdf/measure-text'
+import { photographForPage } from '../../pdf/photograph'
+import { renderPdf } from '../../pdf/render-pdf'
+
+/** The certificate's page, from what was kept of it and the photograph's file: always the same. */
+export async function describeCertificate(
+  { storage }: Pick<AppContext, 'storage'>,
+  snapshot: CertificateSnapshot,
+): Promise<PageDescription> {
+  const [photo, map] = await Promise.all([
+    photographForPage(await readFile(storage.pathOf(snapshot.photo.sha256))),
+    drawMapColours(snapshot.figure.map),
+  ])
+  return layoutCertificate(snapshot, { photo, map }, createMeasure())
+}
+
+/** The certificate as a PDF. */
+export async function printCertificate(
+  context: Pick<AppContext, 'storage'>,
+  snapshot: CertificateSnapshot,
+): Promise<Buffer> {
+  const page = await describeCertificate(context, snapshot)
+  const { number, shop, issued } = snapshot
+  return renderPdf(page, {
+    title: page.title,
+    author: shop.name,
+    createdAt: new Date(issued.at),
+    subject: number,
+  })
+}
