@@ -1,6 +1,6 @@
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import type { PageDescription } from '@shared/schemas/page-description'
-import { type Density, roomiest } from './certificate/density'
+import { roomiest } from './certificate/density'
 import { drawEquipment } from './certificate/equipment-table'
 import { drawExplanations } from './certificate/explanations'
 import { drawFoot } from './certificate/foot'
@@ -26,8 +26,8 @@ export interface CertificatePictures {
   map: PagePicture
 }
 
-/** Lowest baseline on the page, units: 8.5 mm above its edge. */
-const lowest = 853
+/** Lowest baseline on the page, units: 9.5 mm above its edge. */
+const lowest = 850
 
 /** The certificate's page, A4: set as roomily as lets everything that it says stand on it. */
 export function layoutCertificate(
@@ -35,7 +35,7 @@ export function layoutCertificate(
   pictures: CertificatePictures,
   measure: Measure,
 ): PageDescription {
-  const content = { snapshot, pictures, surface: mapSurface(snapshot.figure.map) }
+  const content = { snapshot, pictures, surface: mapSurface(snapshot) }
   const sheet = roomiest((density) =>
     composed(content, new Sheet(measure, density), new Sheet(measure, density)),
   )

@@ -198,3 +198,44 @@ const paper = {
   issued: { name: 'Ines Calloway', at: '2026-12-01T10:14:00.000Z' },
   onePersonShop: false,
 }
+
+/** So many characters, in long words and with letters of several font files. */
+function longText(length: number): string {
+  return 'Wolfeschlegelstein Łódź hausenbergerdorff '.repeat(20).slice(0, length).trim()
+}
+
+const longDetails: CertificateSnapshot['equipment'][number]['details'][] = [
+  { kind: 'referenceFlat', diameterMm: 152.4, formUm: 0.0317, expandedUUm: 0.0123 },
+  { kind: 'lightSource', wavelengthNm: 632.81623, relativeU: 0.0123, lamp: 'laser' },
+  { kind: 'cameraSetUp', viewingAngleDeg: 12.25, viewingAngleUDeg: 1.25, distanceMm: 600, mirrored: false },
+  { kind: 'thermometer', uC: 0.04 },
+]
+
+/** Everything that people type, as long as the forms let it be. */
+export const longNames: FixtureChange = {
+  number: 'ABCDEFGH-2026-12345',
+  replaces: 'ABCDEFGH-2026-12344',
+  checkUrl: `https://${'long.'.repeat(38)}example/check/7KQ4-MR2X-9HTD`,
+  shop: { name: longText(100), address: longText(300), email: 'x'.repeat(200) },
+  issuedTo: { name: longText(120), address: longText(300) },
+  part: { number: longText(60), revision: longText(20), name: longText(120), material: longText(120) },
+  piece: { serial: longText(60), lotNumber: longText(60), order: longText(60) },
+  face: { name: longText(60) },
+  received: longText(120),
+  departureReason: longText(500),
+  procedure: longText(120),
+  equipment: longDetails.map((details) => ({
+    name: longText(60),
+    details,
+    calibration: {
+      laboratory: longText(120),
+      certificateNumber: longText(80),
+      calibratedOn: '2026-01-22',
+      dueOn: '2027-11-30',
+    },
+  })),
+  measured: { name: longText(120), at: '2026-11-30T09:12:00.000Z' },
+  agreed: { name: 'x'.repeat(120), at: '2026-11-30T14:40:00.000Z' },
+  issued: { name: longText(120), at: '2026-12-01T10:14:00.000Z' },
+  onePersonShop: true,
+}

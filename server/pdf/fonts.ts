@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
 import type { PageWeight } from '@shared/schemas/page-description'
 import PDFDocument from 'pdfkit'
+import { unwrapWoff } from './unwrap-woff'
 
 /** Subsets of Source Sans 3 as its package parts them, the one that holds most of what we write first. */
 const subsets = ['latin', 'latin-ext', 'greek', 'cyrillic'] as const
@@ -38,7 +39,7 @@ export function allFontFiles(): FontFile[] {
 
 function openFont(weight: PageWeight, subset: (typeof subsets)[number]): FontFile {
   const file = `@fontsource/source-sans-3/files/source-sans-3-${subset}-${weights[weight]}-normal.woff`
-  const bytes = readFileSync(require.resolve(file))
+  const bytes = unwrapWoff(readFileSync(require.resolve(file)))
   const document = new PDFDocument({ autoFirstPage: false }).font(bytes)
   const { font } = (document as unknown as OpenedFont)._font
   return {

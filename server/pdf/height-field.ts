@@ -43,26 +43,56 @@ function rangeOf(heightsNm: StoredMap['heightsNm']): Pick<HeightField, 'leastUm'
   return { leastUm: leastNm / 1000, mostUm: mostNm / 1000 }
 }
 
-/** Ring by ring from the measured places: each place takes the height of the neighbour that reached it first. */
-function spreadOutwards(heights: Float64Array, known: Uint8Array, columns: number, rows: number): void {
-  const reached = known.slice()
-  const queue = new Int32Array(reached.length)
-  let end = 0
-  for (let cell = 0; cell < reached.length; cell += 1) if (reached[cell] === 1) queue[end++] = cell
-  const visit = (from: number, to: number) => {
-    if (reached[to] === 1) return
-    reached[to] = 1
-    heights[to] = heights[from]
-    queue[end++] = to
+/** So many rings beyond the rim go on as steeply as the surface arrives there: what is seen near the rim is between them. */
+const slopedRings = 3
+
+function spreadOutwards(heights: Float64Array, measured: Uint8Array, columns: number, rows: number): void {
+  const reached = measured.slice()
+  let edge = Array.from(reached.keys()).filter((cell) => reached[cell] === 1)
+  for (let ring = 0; edge.length > 0; ring += 1) {
+    const next = new Set<number>()
+    for (const cell of edge) {
+      for (const to of neighbours(cell, columns, rows)) if (reached[to] === 0) next.add(to)
+    }
+    const isSloped = ring < slopedRings
+    const found = Array.from(next, (cell) => continued(heights, reached, cell, columns, rows, isSloped))
+    edge = Array.from(next)
+    edge.forEach((cell, i) => {
+      heights[cell] = found[i]
+      reached[cell] = 1
+    })
   }
-  for (let head = 0; head < end; head += 1) {
-    const cell = queue[head]
-    const column = cell % columns
-    if (column > 0) visit(cell, cell - 1)
-    if (column < columns - 1) visit(cell, cell + 1)
-    if (cell >= columns) visit(cell, cell - columns)
-    if (cell < columns * (rows - 1)) visit(cell, cell + columns)
+}
+
+function neighbours(cell: number, columns: number, rows: number): number[] {
+  const column = cell % columns
+  return [
+    ...(column > 0 ? [cell - 1] : []),
+    ...(column < columns - 1 ? [cell + 1] : []),
+    ...(cell >= columns ? [cell - columns] : []),
+    ...(cell < columns * (rows - 1) ? [cell + columns] : []),
+  ]
+}
+
+/** Mean of what the reached neighbours say: each carried on by its slope from the one behind it, where that is known. */
+function continued(
+  heights: Float64Array,
+  reached: Uint8Array,
+  cell: number,
+  columns: number,
+  rows: number,
+  isSloped: boolean,
+): number {
+  let sum = 0
+  let count = 0
+  for (const near of neighbours(cell, columns, rows)) {
+    if (reached[near] === 0) continue
+    const behind = 2 * near - cell
+    const isKnown = isSloped && neighbours(near, columns, rows).includes(behind) && reached[behind] === 1
+    sum += isKnown ? 2 * heights[near] - heights[behind] : heights[near]
+    count += 1
   }
+  return sum / count
 }
 
 /** Value at a place between grid places; beyond the rim of the grid the nearest counts. */

@@ -11,8 +11,9 @@ import { closeDatabase, type Db, openDatabase } from '../db/client'
 import { verifyChain } from '../db/events'
 import { migrateDatabase } from '../db/migrate'
 import { selectReadingRows } from '../db/reading-rows'
+import { certificates } from '../db/schema/certificates'
 import { events } from '../db/schema/events'
-import { reviewRemarks } from '../db/schema/reviews'
+import { dispositions, reviewRemarks } from '../db/schema/reviews'
 import { readEnv } from '../env'
 import { createLogger } from '../logger'
 import { createPhotoStorage } from '../storage/photo-storage'
@@ -74,23 +75,43 @@ function contentOf(db: Db) {
 }
 
 describe('the demo shop', () => {
-  it('has readings in every state short of certified, each with its photograph', () => {
+  it('has readings in every state, each with its photograph', () => {
     const rows = readingsOf(first)
     expect(rows.map(({ serial }) => serial)).toEqual(demoReadings.map(({ serial }) => serial))
     expect(new Set(rows.map(({ state }) => state))).toEqual(
-      new Set(['draft', 'sentForReview', 'sentBack', 'agreed', 'setAside']),
+      new Set(['draft', 'sentForReview', 'sentBack', 'agreed', 'certified', 'setAside']),
     )
     expect(new Set(rows.map(({ serial }) => serial)).size).toBeGreaterThanOrEqual(12)
     expect(rows.every(({ photoSha256 }) => photoSha256 !== null)).toBe(true)
   })
 
-  it('has drafts without a figure and one with it, and a remark pinned to a place', () => {
+  it('has drafts without a figure and one with it, and remarks pinned to places, open and closed', () => {
     const drafts = readingsOf(first).filter(({ state }) => state === 'draft')
     expect(drafts.filter(({ result }) => result === null).length).toBeGreaterThanOrEqual(2)
     expect(drafts.filter(({ result }) => result !== null)).toHaveLength(1)
-    expect(first.select().from(reviewRemarks).all()).toMatchObject([
-      { place: { x: expect.any(Number), y: expect.any(Number) } },
+    const pinned = { place: { x: expect.any(Number), y: expect.any(Number) } }
+    const remarks = first.select().from(reviewRemarks).orderBy(asc(reviewRemarks.createdAt)).all()
+    expect(remarks).toMatchObject([
+      { ...pinned, closedAt: expect.any(String) },
+      { ...pinned, closedAt: null },
     ])
+  })
+
+  it('has certificates that stand, that were replaced and that were withdrawn, numbered without a gap', () => {
+    const rows = first.select().from(certificates).orderBy(asc(certificates.count)).all()
+    expect(rows.map(({ count, state }) => [count, state])).toEqual([
+      [1, 'issued'],
+      [2, 'withdrawn'],
+      [3, 'replaced'],
+      [4, 'issued'],
+    ])
+    expect(first.select().from(dispositions).all()).toMatchObject([{ kind: 'rework' }])
+  })
+
+  it('has a lot that is half done: certified, agreed, begun and not begun', () => {
+    const lot = readingsOf(first).filter(({ partNumber }) => partNumber === 'SR-40')
+    expect(new Set(lot.map(({ state }) => state))).toEqual(new Set(['certified', 'agreed', 'draft']))
+    expect(new Set(lot.map(({ serial }) => serial)).size).toBeLessThan(5)
   })
 
   it('has figures that conform, that do not, and that prove neither', () => {
@@ -109,7 +130,7 @@ describe('the demo shop', () => {
 
   it('has a disc that is lapped flatter from day to day', () => {
     const series = readingsOf(first).filter(({ serial }) => serial === 'LD-60-21')
-    expect(series.map(({ state }) => state)).toEqual(['agreed', 'agreed', 'agreed'])
+    expect(series.map(({ state }) => state)).toEqual(['agreed', 'agreed', 'certified'])
     const figuresUm = series.map(({ result }) => Number(result?.flatnessUm))
     expect(figuresUm).toEqual([...figuresUm].sort((a, b) => b - a))
     expect(figuresUm[2]).toBeLessThan(figuresUm[0] / 2)

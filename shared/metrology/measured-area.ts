@@ -259,12 +259,17 @@ export interface MapGrid {
   readonly coverage: Float32Array
 }
 
-/** A grid of `across` places over the longer side of the measured area. */
+/**
+ * A grid of `across` places over the longer side of the measured area. Its outermost places lie half a step beyond
+ * the area, so that a straight rim runs between two rows of cells and not through one.
+ */
 export function mapGrid(area: MeasuredArea, across = 96): MapGrid {
-  const [left, top, right, bottom] = extentMm(area)
-  const stepMm = Math.max(right - left, bottom - top) / (across - 1)
-  const columns = Math.max(1, Math.ceil((right - left) / stepMm - 1e-9) + 1)
-  const rows = Math.max(1, Math.ceil((bottom - top) / stepMm - 1e-9) + 1)
+  const [areaLeft, areaTop, right, bottom] = extentMm(area)
+  const stepMm = Math.max(right - areaLeft, bottom - areaTop) / (across - 2)
+  const columns = Math.max(1, Math.ceil((right - areaLeft) / stepMm - 1e-9) + 2)
+  const rows = Math.max(1, Math.ceil((bottom - areaTop) / stepMm - 1e-9) + 2)
+  const left = areaLeft - stepMm / 2
+  const top = areaTop - stepMm / 2
   const index: number[] = []
   const xs: number[] = []
   const ys: number[] = []

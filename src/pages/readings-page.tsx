@@ -104,7 +104,7 @@ function FilterFields() {
           { value: '', label: t('anyCustomer') },
           ...(customers.data?.rows ?? []).map(({ id, name }) => ({ value: id, label: name })),
         ]}
-        className="w-48"
+        className="w-56"
       />
       <TextField
         label={t('from')}

@@ -28,7 +28,7 @@ function densityAt(tightness: number): Density {
   return { picture: between('picture'), plot: between('plot'), text: between('text'), gap: between('gap') }
 }
 
-const halvings = 6
+const halvings = 5
 
 /** What is composed at the roomiest density that `compose` doesn't refuse with null; null where it refuses them all. */
 export function roomiest<Composed>(compose: (density: Density) => Composed | null): Composed | null {

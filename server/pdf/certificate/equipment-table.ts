@@ -16,6 +16,12 @@ const columns = [
 /** What it was measured with, each with its figure, calibration and last valid day; gives the lower end. */
 export function drawEquipment(sheet: Sheet, top: number, { equipment }: CertificateSnapshot): number {
   sheet.text(0, top, words('head.equipment'), sheet.style(9.8, 'semibold'))
+  if (equipment.length === 0) {
+    const style = sheet.style(9.2)
+    const y = top + 6.5 * sheet.density.text + style.size
+    sheet.text(0, y, words('equipment.none'), style)
+    return y
+  }
   const label = sheet.style(8.2, 'regular', inks.muted)
   const body = sheet.style(9.2)
   let y = top + 5.5 * sheet.density.text + label.size

@@ -48,7 +48,7 @@ function drawSigners(
 
 /** On one line where both fit beside one another, else one under the other. */
 function drawFootLines(sheet: Sheet, y: number, { checkUrl, checkCode }: CertificateSnapshot): number {
-  const style = { ...sheet.style(8.2, 'regular', inks.muted), size: 8.2 }
+  const style = sheet.style(8.2, 'regular', inks.muted)
   const strong = { ...style, weight: 'semibold', colour: inks.ink } as const
   const scope = words('foot.scope')
   const check = words('foot.check', { address: checkAddress(checkUrl, checkCode) })

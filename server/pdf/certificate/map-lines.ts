@@ -1,7 +1,9 @@
+import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import { contours } from 'd3-contour'
-import { type HeightField, heightField, type StoredMap } from '../height-field'
+import { type HeightField, heightField } from '../height-field'
 import { linePath, type Point } from './paths'
 import { niceStep } from './rule-scale'
+import { trueRim } from './true-rim'
 
 /** Lines of a map in cells of its grid, from the grid's top left corner. */
 type Lines = readonly (readonly Point[])[]
@@ -15,6 +17,9 @@ export interface MapSurface {
   contours: readonly { valueUm: number; isPlane: boolean; lines: Lines }[]
 }
 
+/** A grid's rim lies no farther than this from the true one, but at a corner. */
+const rimReachCells = 0.75
+
 export interface GridPlace {
   x: number
   y: number
@@ -22,13 +27,25 @@ export interface GridPlace {
   cell: number
 }
 
-export function mapSurface(map: StoredMap): MapSurface {
+export function mapSurface(snapshot: CertificateSnapshot): MapSurface {
+  const { map } = snapshot.figure
   const field = heightField(map)
+  const onRim = onTrueRim(snapshot)
   return {
     field,
-    rim: outlineOf(field.coverage, field),
+    rim: outlineOf(field.coverage, field).map((line) => line.map(onRim)),
     unsupported: field.unsupported.includes(1) ? outlineOf(field.unsupported, field) : [],
     contours: contoursOf(field),
+  }
+}
+
+/** Cells to mm and back. */
+function onTrueRim(snapshot: CertificateSnapshot): (place: Point) => Point {
+  const { x0Mm, y0Mm, stepMm } = snapshot.figure.map
+  const snap = trueRim(snapshot, rimReachCells * stepMm)
+  return ([column, row]) => {
+    const [xMm, yMm] = snap([x0Mm + (column - 0.5) * stepMm, y0Mm + (row - 0.5) * stepMm])
+    return [(xMm - x0Mm) / stepMm + 0.5, (yMm - y0Mm) / stepMm + 0.5]
   }
 }
 
@@ -46,7 +63,7 @@ export function linesPath(lines: Lines, { x, y, cell }: GridPlace, closed = fals
 
 /** About twelve contours over the heights, in steps of 1, 2 or 5. */
 function contoursOf(field: HeightField): MapSurface['contours'] {
-  const { leastUm, mostUm, columns, rows, heightsUm } = field
+  const { leastUm, mostUm, columns, rows } = field
   const step = niceStep((mostUm - leastUm) / 12)
   const first = Math.ceil(leastUm / step)
   const last = Math.floor(mostUm / step)
@@ -54,12 +71,26 @@ function contoursOf(field: HeightField): MapSurface['contours'] {
   const onEdge = ([x, y]: number[]) => x <= 0 || y <= 0 || x >= columns || y >= rows
   return contours()
     .size([columns, rows])
-    .thresholds(levels)(Array.from(heightsUm))
+    .thresholds(levels)(withoutSteps(field))
     .map(({ value, coordinates }) => ({
       valueUm: value,
       isPlane: Math.abs(value) < step / 2,
       lines: coordinates.flat().flatMap((ring) => partsOff(ring, onEdge)),
     }))
+}
+
+/** The heights are kept in whole nanometres, and lines of gentle slopes would follow those steps: a quarter of each neighbour's. */
+function withoutSteps({ heightsUm, columns, rows }: HeightField): number[] {
+  const at = (values: ArrayLike<number>, y: number, x: number) =>
+    values[Math.min(rows - 1, Math.max(0, y)) * columns + Math.min(columns - 1, Math.max(0, x))]
+  const along = Array.from(heightsUm, (um, cell) => {
+    const [y, x] = [Math.floor(cell / columns), cell % columns]
+    return um / 2 + (at(heightsUm, y, x - 1) + at(heightsUm, y, x + 1)) / 4
+  })
+  return along.map((um, cell) => {
+    const [y, x] = [Math.floor(cell / columns), cell % columns]
+    return um / 2 + (at(along, y - 1, x) + at(along, y + 1, x)) / 4
+  })
 }
 
 /** d3-contour closes its rings along the grid's edge; those stretches are no contour. */

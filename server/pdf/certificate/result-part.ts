@@ -8,7 +8,7 @@ import { drawToleranceRule } from './tolerance-rule'
 import { drawVerdictSign, verdictInk } from './verdict-sign'
 import { plainNumber, words } from './words'
 
-const width = 330
+const width = 344
 
 /** The figure, its rule and its verdict on the left, all other figures on the right; gives the lower end. */
 export function drawResult(sheet: Sheet, top: number, snapshot: CertificateSnapshot): number {

@@ -6,7 +6,7 @@ import { formatDay } from '@/lib/format-when'
 import { CertificateStateWords } from './certificate-state'
 
 export const certificateColumns =
-  'grid items-center gap-x-4 grid-cols-[8.5rem_minmax(0,1fr)_minmax(0,1fr)_8rem_9rem_7rem] desk:grid-cols-[9rem_minmax(0,1.1fr)_minmax(0,1fr)_9rem_10rem_12rem]'
+  'grid items-center gap-x-3 grid-cols-[6.75rem_minmax(0,1.5fr)_minmax(0,1fr)_6.25rem_8rem_6.25rem] desk:gap-x-4 desk:grid-cols-[9rem_minmax(0,1.1fr)_minmax(0,1fr)_9rem_10rem_12rem]'
 
 /** One certificate in a list. */
 export function CertificateLine({ certificate }: { certificate: CertificateRow }) {
