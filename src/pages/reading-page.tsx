@@ -51,7 +51,7 @@ export function ReadingPage() {
 function OthersActions({ reading }: { reading: Reading }) {
   const { t } = useTranslation('readings')
   const mayIssue = useMay('certificate:issue')
-  const hasReview = reading.state !== 'draft'
+  const hasReview = reading.state !== 'draft' || reading.sentBackReason !== null
   const piece = usePiece(mayIssue ? reading.pieceId : null)
   return (
     <>

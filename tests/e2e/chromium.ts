@@ -1,6 +1,6 @@
-import { spawnSync } from 'node:child_process'
 import { existsSync } from 'node:fs'
 import { type Browser, chromium } from 'playwright-core'
+import { requireProgram } from '../debian-program'
 
 const places = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome']
 
@@ -14,17 +14,9 @@ function findChromium(): string | undefined {
  * @throws Error with a sentence that says what to do
  */
 export function requireChromium(): string {
-  const found = findChromium()
-  if (found) return found
-  if (process.getuid?.() === 0 && existsSync('/usr/bin/apt-get')) {
-    console.log('Installing Chromium for the browser tests …')
-    const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' }
-    spawnSync('apt-get', ['update'], { stdio: 'ignore', env })
-    spawnSync('apt-get', ['install', '-y', '--no-install-recommends', 'chromium'], { stdio: 'inherit', env })
-    const installed = findChromium()
-    if (installed) return installed
-  }
-  throw new Error(
+  return requireProgram(
+    findChromium,
+    'chromium',
     'The browser tests need Chromium. Install it (Debian: apt-get install chromium) or name one in CHROMIUM_PATH.',
   )
 }

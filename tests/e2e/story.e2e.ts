@@ -1,10 +1,10 @@
 import { readFileSync } from 'node:fs'
-import { AxeBuilder } from '@axe-core/playwright'
 import type { MeasureFile } from '@shared/schemas/measure-file'
 import type { Browser, BrowserContext, Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { launchChromium } from './chromium'
 import { type RunningServer, startLapwing } from './lapwing-server'
+import { type Answer, call, overflowPx, seriousFaults, signIn, windowSizes } from './shop-hand'
 import { TableHand } from './table-hand'
 
 const fixtures = 'tests/fixtures/practice'
@@ -32,40 +32,6 @@ afterAll(async () => {
   await server?.stop()
 })
 
-async function signIn(on: Page, email: string, password: string): Promise<void> {
-  await on.goto(server.url)
-  await on.getByLabel('E-mail').fill(email)
-  await on.getByLabel('Password').fill(password)
-  await on.keyboard.press('Enter')
-  await on.getByRole('link', { name: /Lapwing/ }).waitFor()
-}
-
-interface Answer {
-  status: number
-  // biome-ignore lint/suspicious/noExplicitAny: whatever the server sends, asked field by field
-  json: any
-}
-
-/** Sends JSON as the page itself would, with its cookie and origin. */
-async function call(on: Page, method: string, path: string, body?: unknown): Promise<Answer> {
-  return on.evaluate(
-    async ({ method, path, body }) => {
-      const response = await fetch(`/api${path}`, {
-        method,
-        headers: { 'content-type': 'application/json' },
-        body: body === undefined ? undefined : JSON.stringify(body),
-      })
-      return { status: response.status, json: await response.json().catch(() => null) }
-    },
-    { method, path, body },
-  )
-}
-
-async function seriousFaults(on: Page): Promise<string[]> {
-  const { violations } = await new AxeBuilder({ page: on }).analyze()
-  return violations.filter((v) => v.impact === 'serious' || v.impact === 'critical').map((v) => v.id)
-}
-
 describe('an evening at the bench', () => {
   let tableUrl: string
 
@@ -75,7 +41,7 @@ describe('an evening at the bench', () => {
     await page.getByLabel('Password').fill('not the password')
     await page.keyboard.press('Enter')
     expect(await page.getByRole('alert').textContent()).toMatch(/password/i)
-    await signIn(page, 'maren@quillmere.example', 'straw bands at noon')
+    await signIn(page, server.url, 'maren@quillmere.example', 'straw bands at noon')
     expect(await seriousFaults(page)).toEqual([])
   })
 
@@ -199,7 +165,7 @@ describe('an evening at the bench', () => {
 
   it('a second person sees the reading and is refused what is not theirs', async () => {
     const other = await (await browser.newContext()).newPage()
-    await signIn(other, 'edda@quillmere.example', 'clean dry and soaked')
+    await signIn(other, server.url, 'edda@quillmere.example', 'clean dry and soaked')
     const readingId = tableUrl.split('/').at(-2)!
     const { json: reading } = await call(other, 'GET', `/readings/${readingId}`)
     expect(reading.mayEdit).toBe(false)
@@ -234,17 +200,13 @@ describe('an evening at the bench', () => {
   it.each(['/', '/readings', '/pieces', '/parts', '/equipment'])(
     '%s has no serious fault of access at either size',
     async (path) => {
-      for (const viewport of [
-        { width: 1280, height: 800 },
-        { width: 820, height: 1180 },
-      ]) {
+      for (const viewport of windowSizes) {
         await page.setViewportSize(viewport)
         await page.goto(`${server.url}${path}`)
         await page.getByRole('main').waitFor()
         await page.waitForLoadState('networkidle')
         expect(await seriousFaults(page)).toEqual([])
-        const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)
-        expect(overflow).toBeLessThanOrEqual(0)
+        expect(await overflowPx(page)).toBeLessThanOrEqual(0)
       }
     },
   )

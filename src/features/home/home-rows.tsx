@@ -16,7 +16,7 @@ export function WaitingRow({ reading }: { reading: ReadingRow }) {
   return (
     <ReadingLine
       reading={reading}
-      to={`/readings/${reading.id}`}
+      to={reading.state === 'sentForReview' ? `/review/${reading.id}` : `/readings/${reading.id}`}
       what={t(`waiting.${reading.state}`, facts)}
       note={t(`waiting.${reading.state}Note`, facts)}
       when={formatSince(reading.updatedAt)}
