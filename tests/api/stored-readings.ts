@@ -60,9 +60,11 @@ export function storeReading(context: AppContext, reading: ReadingToStore): stri
   const id = newId()
   const at = now().toISOString()
   db.insert(readings)
-    .values({ ...columns, id, createdAt: at, updatedAt: at, ...blank, marks: emptyMarks() })
+    .values({ ...columns, state: 'draft', id, createdAt: at, updatedAt: at, ...blank, marks: emptyMarks() })
     .run()
   if (verdict) storeResult(context, id, reading.faceId, verdict)
+  // Last, since a certified reading can't be changed any more.
+  db.update(readings).set({ state: reading.state }).where(eq(readings.id, id)).run()
   return id
 }
 
@@ -114,7 +116,7 @@ function storeResult({ db, now }: AppContext, readingId: string, faceId: string,
       inputs: { ...blank, traced: { ...tracedNothing, size: { kind: 'round', diameterMm: 50 } } },
     })
     .run()
-  db.update(readings).set({ latestResultId: id }).where(eq(readings.id, readingId)).run()
+  db.update(readings).set({ latestResultId: id, verdict }).where(eq(readings.id, readingId)).run()
 }
 
 const tracedNothing = {

@@ -18,18 +18,34 @@ const queries = [
   { limit: '200' },
 ]
 
+/** What the archive is asked: every kind of condition, alone and together. */
+const searches = [
+  { search: 'pn-1017', state: 'certified' },
+  { search: 'ring 31', verdict: 'conforms' },
+  { verdict: 'doesNotConform' },
+  { verdict: 'neitherProven', from: '2025-03-01' },
+  { from: '2025-03-01', to: '2025-03-31' },
+  { from: '2025-03-01', verdict: 'conforms', state: 'agreed' },
+  { search: 'customer', to: '2025-06-30' },
+  { search: 'nothing of that name' },
+]
+
 /** Pages of the list of readings as the server makes them, JSON included, out of 20,000. */
-export async function benchReadingList(folder: string): Promise<Measurement> {
+export async function benchReadingList(folder: string): Promise<Measurement[]> {
   const shop = await makeLargeShop(folder)
   const marks = pageMarks(shop)
-  const ask = (round: number) => {
-    const query = { ...queries[round % queries.length], ...marks[round % marks.length] }
+  const ask = (asked: readonly object[]) => (round: number) => {
+    const query = { ...asked[round % asked.length], ...marks[round % marks.length] }
     JSON.stringify(listPage(shop, query, round))
   }
-  const times = await timesOf(ask, { rounds: 300, warmUp: 30 })
+  const lists = await timesOf(ask(queries), { rounds: 300, warmUp: 30 })
+  const found = await timesOf(ask(searches), { rounds: 300, warmUp: 30 })
   await shop.context.analysis.close()
   closeDatabase(shop.context.db)
-  return measurement(`list of readings out of ${readingCount}, p95`, percentile(times, 0.95), 25)
+  return [
+    measurement(`list of readings out of ${readingCount}, p95`, percentile(lists, 0.95), 25),
+    measurement(`search of the archive out of ${readingCount}, p95`, percentile(found, 0.95), 25),
+  ]
 }
 
 function listPage({ context, people }: LargeShop, query: object, round: number) {

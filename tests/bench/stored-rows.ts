@@ -67,11 +67,14 @@ interface ReadingToStore {
 export function storeReading(tx: Tx, { piece, face, at, ...columns }: ReadingToStore): void {
   const id = newId()
   const resultId = newId()
+  const verdict = at % 7 > 3 ? 'doesNotConform' : 'conforms'
   const taken = new Date(firstMs + at * 900_000).toISOString()
   tx.insert(readings)
     .values({
       ...columns,
       ...nothingStated,
+      // Its own state comes with its result: a certified reading can't be changed any more.
+      state: 'draft',
       id,
       pieceId: piece.id,
       faceId: face.id,
@@ -91,7 +94,7 @@ export function storeReading(tx: Tx, { piece, face, at, ...columns }: ReadingToS
       flatnessUm: 0.3 + (at % 7) / 10,
       minimumZoneUm: 0.3 + (at % 7) / 10,
       expandedUncertaintyUm: 0.02,
-      verdict: at % 7 > 3 ? 'doesNotConform' : 'conforms',
+      verdict,
       computedAt: taken,
       computedById: columns.takenById,
       face,
@@ -99,7 +102,10 @@ export function storeReading(tx: Tx, { piece, face, at, ...columns }: ReadingToS
       inputs: { ...nothingStated, traced: { ...tracedOutline, traces: someTraces } },
     })
     .run()
-  tx.update(readings).set({ latestResultId: resultId }).where(eq(readings.id, id)).run()
+  tx.update(readings)
+    .set({ latestResultId: resultId, verdict, state: columns.state })
+    .where(eq(readings.id, id))
+    .run()
 }
 
 const someTraces = Array.from({ length: 10 }, (_, order) => ({

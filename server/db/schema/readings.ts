@@ -1,5 +1,6 @@
 import type { Marks } from '@shared/schemas/marks'
 import type { Conditions, Photo, ReadingSetUp } from '@shared/schemas/readings'
+import type { Verdict } from '@shared/schemas/results'
 import type { ReadingState } from '@shared/workflow/reading-states'
 import { type AnySQLiteColumn, index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core'
 import { faces, pieces } from './parts'
@@ -35,6 +36,8 @@ export const readings = sqliteTable(
     lappedSince: integer('lapped_since', { mode: 'boolean' }).notNull().default(false),
     agreedById: text('agreed_by_id').references(() => people.id),
     agreedAt: text('agreed_at'),
+    /** Of the latest result, kept here so that the archive finds readings by it along an index. */
+    verdict: text('verdict').$type<Verdict>(),
     createdAt: text('created_at').notNull(),
     updatedAt: text('updated_at').notNull(),
     marksVersion: integer('marks_version').notNull().default(0),
@@ -52,6 +55,15 @@ export const readings = sqliteTable(
     index('readings_taker_created').on(table.takenById, table.createdAt, table.id),
     index('readings_piece_created').on(table.pieceId, table.createdAt, table.id),
     index('readings_face').on(table.faceId),
+    index('readings_taker_state').on(table.takenById, table.state, table.createdAt, table.id),
+    index('readings_verdict').on(
+      table.verdict,
+      table.createdAt,
+      table.id,
+      table.state,
+      table.pieceId,
+      table.faceId,
+    ),
   ],
 )
 

@@ -23,7 +23,7 @@ export function drawFormWords(sheet: Sheet, top: number, snapshot: CertificateSn
   )
 }
 
-export function formWords(snapshot: CertificateSnapshot): string {
+function formWords(snapshot: CertificateSnapshot): string {
   const { decimals } = figureWords(snapshot)
   return snapshot.figure.statements
     .map(({ code, params }) => words('statement', { text: wordsOf('form', code, shown(params, decimals)) }))

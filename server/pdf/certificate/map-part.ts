@@ -20,7 +20,7 @@ interface MapPlace extends GridPlace {
   ofMm: (xMm: number, yMm: number) => Point
 }
 
-export interface MapContent {
+interface MapContent {
   snapshot: CertificateSnapshot
   surface: MapSurface
   colours: PagePicture

@@ -44,7 +44,7 @@ export function circlePath(cx: number, cy: number, r: number): string {
   return ellipsePath(cx, cy, r, r, 0)
 }
 
-export function ellipsePath(cx: number, cy: number, rx: number, ry: number, rotationDeg: number): string {
+function ellipsePath(cx: number, cy: number, rx: number, ry: number, rotationDeg: number): string {
   const turn = (rotationDeg * Math.PI) / 180
   const on = (u: number, v: number): string =>
     at([

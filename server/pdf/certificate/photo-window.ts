@@ -1,6 +1,6 @@
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
+import type { Shape } from '@shared/schemas/shapes'
 import type { Point } from './paths'
-import { boundsOf } from './photograph-part'
 
 /** The part of the photograph that the page shows, and where. */
 export interface PhotoWindow {
@@ -13,7 +13,7 @@ export interface PhotoWindow {
   place: (xPx: number, yPx: number) => Point
 }
 
-export const photoWidth = 154
+const photoWidth = 154
 const leastHeight = 72
 /** Of the face's size, free on every side. */
 const margin = 0.06
@@ -49,4 +49,17 @@ function faceBounds({ marks, photo }: CertificateSnapshot) {
 
 function held(start: number, most: number): number {
   return Math.min(Math.max(0, most), Math.max(0, start))
+}
+
+export type Bounds = readonly [x0: number, y0: number, x1: number, y1: number]
+
+/** Of a shape in photo pixels; a turned ellipse by its longer half-axis. */
+export function boundsOf(shape: Shape): Bounds {
+  if (shape.kind === 'polygon') {
+    const xs = shape.points.map(([x]) => x)
+    const ys = shape.points.map(([, y]) => y)
+    return [Math.min(...xs), Math.min(...ys), Math.max(...xs), Math.max(...ys)]
+  }
+  const r = shape.kind === 'circle' ? shape.r : Math.max(shape.rx, shape.ry)
+  return [shape.cx - r, shape.cy - r, shape.cx + r, shape.cy + r]
 }

@@ -4,7 +4,7 @@ import type { Shape } from '@shared/schemas/shapes'
 import type { PagePicture } from '../photograph'
 import { inks } from './inks'
 import { circlePath, hatchPath, linePath, type Point, rectPath, shapePath } from './paths'
-import { type PhotoWindow, photoWindow } from './photo-window'
+import { type Bounds, boundsOf, type PhotoWindow, photoWindow } from './photo-window'
 import type { Sheet } from './sheet'
 import { words } from './words'
 
@@ -65,8 +65,6 @@ function hatchShape(sheet: Sheet, shape: Shape, view: PhotoWindow): void {
   })
 }
 
-type Bounds = readonly [x0: number, y0: number, x1: number, y1: number]
-
 function withinView([x0, y0, x1, y1]: Bounds, view: PhotoWindow): Bounds {
   const [left, top] = view.place(x0, y0)
   const [right, foot] = view.place(x1, y1)
@@ -76,17 +74,6 @@ function withinView([x0, y0, x1, y1]: Bounds, view: PhotoWindow): Bounds {
     Math.min(view.x + view.width, right),
     Math.min(view.y + view.height, foot),
   ]
-}
-
-/** Of a shape in photo pixels; a turned ellipse by its longer half-axis. */
-export function boundsOf(shape: Shape): Bounds {
-  if (shape.kind === 'polygon') {
-    const xs = shape.points.map(([x]) => x)
-    const ys = shape.points.map(([, y]) => y)
-    return [Math.min(...xs), Math.min(...ys), Math.max(...xs), Math.max(...ys)]
-  }
-  const r = shape.kind === 'circle' ? shape.r : Math.max(shape.rx, shape.ry)
-  return [shape.cx - r, shape.cy - r, shape.cx + r, shape.cy + r]
 }
 
 /** Ticks across the rim at twelve, three, six and nine o'clock of a round face. */

@@ -52,7 +52,7 @@ export function drawToleranceRule(sheet: Sheet, y: number, snapshot: Certificate
 }
 
 /** The flatness; for a signed tolerance with the sign of the sagitta, plus where none is known. */
-export function comparedUm({ face, figure, flatnessUm }: CertificateSnapshot): number {
+function comparedUm({ face, figure, flatnessUm }: CertificateSnapshot): number {
   const { sagittaUm } = figure.terms
   const isHollow = face.tolerance.kind === 'signed' && sagittaUm !== null && sagittaUm < 0
   return isHollow ? -flatnessUm : flatnessUm

@@ -8,9 +8,14 @@ import { createMeasure } from '../../pdf/measure-text'
 import { photographForPage } from '../../pdf/photograph'
 import { renderPdf } from '../../pdf/render-pdf'
 
+/** Where the photograph of a certificate lies. */
+interface Photographs {
+  storage: Pick<AppContext['storage'], 'pathOf'>
+}
+
 /** The certificate's page, from what was kept of it and the photograph's file: always the same. */
 export async function describeCertificate(
-  { storage }: Pick<AppContext, 'storage'>,
+  { storage }: Photographs,
   snapshot: CertificateSnapshot,
 ): Promise<PageDescription> {
   const [photo, map] = await Promise.all([
@@ -21,10 +26,7 @@ export async function describeCertificate(
 }
 
 /** The certificate as a PDF. */
-export async function printCertificate(
-  context: Pick<AppContext, 'storage'>,
-  snapshot: CertificateSnapshot,
-): Promise<Buffer> {
+export async function printCertificate(context: Photographs, snapshot: CertificateSnapshot): Promise<Buffer> {
   const page = await describeCertificate(context, snapshot)
   const { number, shop, issued } = snapshot
   return renderPdf(page, {

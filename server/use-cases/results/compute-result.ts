@@ -111,7 +111,7 @@ function store(tx: Tx, row: ResultRecord, marksVersion: number): void {
   tx.insert(results).values(row).run()
   if (row.marksVersion < marksVersion && hasNewer(tx, row)) return
   tx.update(readings)
-    .set({ latestResultId: row.id, updatedAt: row.computedAt })
+    .set({ latestResultId: row.id, verdict: row.verdict, updatedAt: row.computedAt })
     .where(eq(readings.id, row.readingId))
     .run()
 }
