@@ -1,3 +1,4 @@
+import { spawnSync } from 'node:child_process'
 import { createHash } from 'node:crypto'
 import type { Certificate } from '@shared/schemas/certificates'
 import { eq } from 'drizzle-orm'
@@ -240,6 +241,31 @@ describe('fifty certificates at once', () => {
     expect(bench.context.db.select().from(certificatePdfs).all()).toHaveLength(50)
     expect(verifyChain(bench.context.db)).toMatchObject({ intact: true })
   })
+})
+
+describe('a server that is killed while it issues a certificate', () => {
+  it.each(['certificates', 'certificate_pdfs', 'events'])(
+    'leaves nothing half when it dies over its row in %s, and the number is given to the next',
+    { timeout: 120_000 },
+    async (table) => {
+      const bench = await startWithQa()
+      const reading = await agreeMeasured(bench)
+      const { db, env } = bench.context
+      const before = verifyChain(db)
+      const script = ['tests/api/killed-issue.ts', env.dataDir, reading.id, bench.qa.me.id, table]
+      const { signal, stderr } = spawnSync(process.execPath, ['--import', 'tsx', ...script], {
+        encoding: 'utf8',
+      })
+      expect(signal ?? stderr).toBe('SIGKILL')
+      expect(db.$client.pragma('integrity_check', { simple: true })).toBe('ok')
+      expect(db.select().from(certificates).all()).toEqual([])
+      expect(db.select().from(certificatePdfs).all()).toEqual([])
+      expect(verifyChain(db)).toEqual(before)
+      const shown = await bench.qa.agent.get(`/api/readings/${reading.id}`).expect(200)
+      expect(shown.body.state).toBe('agreed')
+      expect((await issue(bench.qa, reading.id)).number).toBe(`FC-${year}-0001`)
+    },
+  )
 })
 
 /** More agreed readings of the same face, with the same figure. */

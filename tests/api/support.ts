@@ -16,6 +16,7 @@ import { type Env, readEnv } from '../../server/env'
 import { createLogger } from '../../server/logger'
 import { createPhotoStorage } from '../../server/storage/photo-storage'
 import { addPerson } from '../../server/use-cases/people/add-person'
+import { testPassword } from './test-password'
 
 export type Agent = ReturnType<typeof supertest.agent>
 
@@ -35,7 +36,8 @@ export interface TestApp {
   advance: (ms: number) => void
 }
 
-export const testPassword = 'three lapped rings'
+export { testPassword }
+
 const startOfTime = Date.parse('2026-11-02T08:00:00.000Z')
 
 const opened: (() => void)[] = []

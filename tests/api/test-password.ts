@@ -1,0 +1,2 @@
+/** Of every person in the tests. */
+export const testPassword = 'three lapped rings'
