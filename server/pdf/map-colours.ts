@@ -1,6 +1,6 @@
+import { heightField, type StoredMap, sampleGrid } from '@shared/look/height-field'
 import { heightRgb } from '@shared/look/height-scale'
 import sharp from 'sharp'
-import { heightField, type StoredMap, sampleGrid } from './height-field'
 import type { PagePicture } from './photograph'
 
 /** Along the longer side: 300 dots an inch in print. */

@@ -1,6 +1,6 @@
+import { niceStep } from '@shared/look/rule-scale'
 import type { DisplayUnit } from '@shared/schemas/settings'
 import { formatNumber, fromUm } from '@shared/units/height'
-import { niceStep } from './tolerance-rule/rule-scale'
 
 export interface ProfileLine {
   tone: 'before' | 'after'

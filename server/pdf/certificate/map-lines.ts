@@ -1,8 +1,8 @@
+import { type HeightField, heightField } from '@shared/look/height-field'
+import { niceStep } from '@shared/look/rule-scale'
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import { contours } from 'd3-contour'
-import { type HeightField, heightField } from '../height-field'
 import { linePath, type Point } from './paths'
-import { niceStep } from './rule-scale'
 import { trueRim } from './true-rim'
 
 /** Lines of a map in cells of its grid, from the grid's top left corner. */

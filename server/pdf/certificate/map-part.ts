@@ -1,5 +1,5 @@
+import type { HeightField } from '@shared/look/height-field'
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
-import type { HeightField } from '../height-field'
 import type { PagePicture } from '../photograph'
 import { inks } from './inks'
 import { type GridPlace, linesPath, type MapSurface } from './map-lines'

@@ -1,9 +1,9 @@
+import type { HeightField } from '@shared/look/height-field'
 import { heightRgb } from '@shared/look/height-scale'
+import { niceStep, stepDecimals } from '@shared/look/rule-scale'
 import { formatNumber } from '@shared/units/height'
-import type { HeightField } from '../height-field'
 import { inks } from './inks'
 import { rectPath } from './paths'
-import { niceStep, stepDecimals } from './rule-scale'
 import type { Sheet } from './sheet'
 import { words } from './words'
 

@@ -1,10 +1,10 @@
+import { type HeightField, sampleGrid } from '@shared/look/height-field'
+import { niceStep, stepDecimals } from '@shared/look/rule-scale'
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import { formatNumber } from '@shared/units/height'
-import { type HeightField, sampleGrid } from '../height-field'
 import { inks } from './inks'
 import { linePath, type Point, pageWidth } from './paths'
 import { type ProfileTrack, profileTrack } from './profile-track'
-import { niceStep, stepDecimals } from './rule-scale'
 import type { Sheet } from './sheet'
 import { plainNumber, words } from './words'
 

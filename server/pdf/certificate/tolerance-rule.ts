@@ -1,10 +1,10 @@
+import { graduations, type RuleScale, ruleScale, stepDecimals } from '@shared/look/rule-scale'
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import type { Verdict } from '@shared/schemas/results'
 import { formatNumber } from '@shared/units/height'
 import { limitNumber } from './figure-words'
 import { inks } from './inks'
 import { hatchPath, linePath, rectPath } from './paths'
-import { graduations, type RuleScale, ruleScale, stepDecimals } from './rule-scale'
 import type { Sheet } from './sheet'
 import { drawVerdictSign, verdictInk } from './verdict-sign'
 
@@ -134,7 +134,7 @@ function drawBreak({ sheet, y }: Rule, x: number): void {
 
 function drawGraduations({ sheet, scale, y }: Rule): void {
   const stroke = { colour: inks.graduation, width: 0.7 }
-  const marks = graduations(scale, width)
+  const marks = graduations(scale.leastUm, scale.mostUm, width)
   sheet.line(0, y, width, y, stroke)
   for (const mark of marks) {
     const x = scale.toX(mark.value)

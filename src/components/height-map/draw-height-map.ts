@@ -1,6 +1,6 @@
+import { type HeightField, sampleGrid } from '@shared/look/height-field'
 import { heightRgb } from '@shared/look/height-scale'
 import { contours } from 'd3-contour'
-import { type HeightGridFilled, sampleGrid } from './height-field'
 import { shareOutline } from './share-outline'
 
 export interface MapRange {
@@ -9,7 +9,7 @@ export interface MapRange {
 }
 
 export interface MapDrawing {
-  grid: HeightGridFilled
+  grid: HeightField
   range: MapRange
   contourStepUm: number
   /** Canvas pixels per grid step, the same both ways. */
@@ -46,8 +46,8 @@ function paintColours(context: CanvasRenderingContext2D, { grid, range, cellPx }
   context.putImageData(image, 0, 0)
 }
 
-function heightAt(grid: HeightGridFilled, column: number, row: number): number {
-  return sampleGrid(grid.heightsUm, grid.columns, grid.rows, column, row)
+function heightAt(grid: HeightField, column: number, row: number): number {
+  return sampleGrid(grid.heightsUm, grid, column, row)
 }
 
 function drawContours(context: CanvasRenderingContext2D, drawing: MapDrawing): void {

@@ -1,7 +1,7 @@
+import { heightField, type StoredMap } from '@shared/look/height-field'
 import type { Figure } from '@shared/schemas/results'
 import { useEffect, useMemo, useRef } from 'react'
 import { drawHeightMap, type MapRange } from './draw-height-map'
-import { fillGrid, type StoredMap } from './height-field'
 import { commonRange, contourStepUm } from './map-range'
 
 interface Place {
@@ -26,7 +26,7 @@ interface Props {
 /** A height map with contours, the plane heavier, and marks at peak and valley. */
 export function HeightMap({ map, peak, valley, sizePx, range, stepUm, label }: Props) {
   const canvasRef = useRef<HTMLCanvasElement>(null)
-  const grid = useMemo(() => fillGrid(map), [map])
+  const grid = useMemo(() => heightField(map), [map])
   const shownRange = useMemo(() => range ?? commonRange([map]), [range, map])
   const step = stepUm ?? contourStepUm(shownRange)
   const cellPx = sizePx / Math.max(map.columns, map.rows)

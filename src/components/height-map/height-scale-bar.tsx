@@ -1,9 +1,9 @@
 import { heightColour } from '@shared/look/height-scale'
+import { niceStep } from '@shared/look/rule-scale'
 import type { DisplayUnit } from '@shared/schemas/settings'
 import { formatNumber, fromUm } from '@shared/units/height'
 import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
-import { niceStep } from '@/components/tolerance-rule/rule-scale'
 import type { MapRange } from './draw-height-map'
 
 interface Props {

@@ -1,6 +1,6 @@
-import { niceStep } from '@/components/tolerance-rule/rule-scale'
+import type { StoredMap } from '@shared/look/height-field'
+import { niceStep } from '@shared/look/rule-scale'
 import type { MapRange } from './draw-height-map'
-import type { StoredMap } from './height-field'
 
 /** One scale for several maps, so that they can be compared; it always holds the plane. */
 export function commonRange(maps: readonly StoredMap[]): MapRange {

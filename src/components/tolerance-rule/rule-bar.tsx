@@ -1,6 +1,6 @@
+import type { RuleScale } from '@shared/look/rule-scale'
 import { useId } from 'react'
 import type { RuleMeasures } from './rule-measures'
-import type { RuleScale } from './rule-scale'
 import type { RuleFacts, RuleState } from './rule-state'
 
 interface Props {
@@ -21,7 +21,7 @@ export function RuleBar({ facts, state, scale, measures, widthPx }: Props) {
   const hatchId = useId()
   const top = measures.baselineYPx - measures.barPx
   const guardUm = facts.resultUm === null ? 0 : facts.guardFactor * (facts.expandedUncertaintyUm ?? 0)
-  const span = (fromUm: number, toUm: number) => clipped(scale.toPx(fromUm), scale.toPx(toUm), widthPx)
+  const span = (fromUm: number, toUm: number) => clipped(scale.toX(fromUm), scale.toX(toUm), widthPx)
   const zone = zoneSpan(scale, guardUm, span)
   const beyond = beyondSpan(facts, state, scale, span)
   return (

@@ -1,7 +1,7 @@
+import { type Graduation, graduations, type RuleScale } from '@shared/look/rule-scale'
 import type { DisplayUnit } from '@shared/schemas/settings'
 import { formatNumber, fromUm, toUm } from '@shared/units/height'
 import type { RuleMeasures, RuleSize } from './rule-measures'
-import { type Graduation, graduations, type RuleScale } from './rule-scale'
 
 interface Props {
   scale: RuleScale
@@ -20,7 +20,7 @@ export function RuleGraduations({ scale, size, measures, widthPx, unit, bandUm }
   const y = measures.baselineYPx + 0.5
   const shown = (valueUm: number) => fromUm(valueUm, unit, bandUm)
   const marks = measures.graduationPx ? graduations(shown(scale.leastUm), shown(scale.mostUm), widthPx) : []
-  const xOf = (mark: Graduation) => scale.toPx(toUm(mark.value, unit, bandUm))
+  const xOf = (mark: Graduation) => scale.toX(toUm(mark.value, unit, bandUm))
   const lengths = measures.graduationPx ?? { major: 0, minor: 0 }
   return (
     <g stroke="var(--graduation)" strokeWidth="1">
@@ -35,7 +35,7 @@ export function RuleGraduations({ scale, size, measures, widthPx, unit, bandUm }
         <Labels
           marks={marks.filter((m) => m.major)}
           xOf={xOf}
-          gates={scale.gatesUm.map((um) => ({ value: shown(um), xPx: scale.toPx(um) }))}
+          gates={scale.gatesUm.map((um) => ({ value: shown(um), xPx: scale.toX(um) }))}
           widthPx={widthPx}
         />
       )}

@@ -1,5 +1,5 @@
+import type { RuleScale } from '@shared/look/rule-scale'
 import { type RuleMeasures, whiskerPx } from './rule-measures'
-import type { RuleScale } from './rule-scale'
 import type { RuleFacts, RuleState } from './rule-state'
 
 interface Props {
@@ -23,7 +23,7 @@ const toneOf: Record<RuleState, string> = {
 
 /** Stem, head and whisker at the result; off the scale, what points there. */
 export function RuleResult({ facts, state, scale, measures, widthPx }: Props) {
-  const xPx = scale.toPx(facts.resultUm)
+  const xPx = scale.toX(facts.resultUm)
   const tone = toneOf[state]
   if (xPx > widthPx || xPx < 0) {
     return <Beyond state={state} tone={tone} measures={measures} widthPx={widthPx} toRight={xPx > widthPx} />
@@ -52,8 +52,8 @@ export function RuleResult({ facts, state, scale, measures, widthPx }: Props) {
 function Whisker({ facts, scale, measures, widthPx, xPx }: Omit<Props, 'state'> & { xPx: number }) {
   const u = facts.expandedUncertaintyUm ?? 0
   const { whiskerYPx: y, capPx } = measures
-  const left = scale.toPx(facts.resultUm - u)
-  const right = scale.toPx(facts.resultUm + u)
+  const left = scale.toX(facts.resultUm - u)
+  const right = scale.toX(facts.resultUm + u)
   const from = Math.max(0, left) - xPx
   const to = Math.min(widthPx, right) - xPx
   return (

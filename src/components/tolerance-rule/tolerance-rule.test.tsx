@@ -1,9 +1,9 @@
 // @vitest-environment happy-dom
 import '@/lib/i18n'
+import { graduations } from '@shared/look/rule-scale'
 import type { Tolerance } from '@shared/schemas/parts'
 import { cleanup, render, screen } from '@testing-library/react'
 import { afterEach, describe, expect, it } from 'vitest'
-import { graduations } from './rule-scale'
 import { ToleranceRule, type ToleranceRuleProps } from './tolerance-rule'
 
 afterEach(cleanup)

@@ -1,10 +1,10 @@
+import { type RuleScale, ruleScale } from '@shared/look/rule-scale'
 import type { DisplayUnit } from '@shared/schemas/settings'
 import { useTranslation } from 'react-i18next'
 import { RuleBar } from './rule-bar'
 import { RuleGraduations } from './rule-graduations'
 import { type RuleMeasures, type RuleSize, ruleMeasures } from './rule-measures'
 import { RuleResult } from './rule-result'
-import { type RuleScale, ruleScale } from './rule-scale'
 import { ruleSentence } from './rule-sentence'
 import { type RuleFacts, ruleState } from './rule-state'
 
@@ -60,7 +60,7 @@ function isBeyond(scale: RuleScale, resultUm: number): boolean {
 function Gates({ scale, measures }: { scale: RuleScale; measures: RuleMeasures }) {
   const { baselineYPx, barPx, gateBelowPx, gatePx } = measures
   return scale.gatesUm.map((gateUm) => {
-    const x = Math.round(scale.toPx(gateUm))
+    const x = Math.round(scale.toX(gateUm))
     return (
       <line
         key={gateUm}

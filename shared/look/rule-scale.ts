@@ -1,4 +1,4 @@
-import type { Tolerance } from '@shared/schemas/parts'
+import type { Tolerance } from '../schemas/parts'
 
 /** The scale runs past the tolerance by this much of it, so that the gate stands at 5/8 of every rule. */
 const reach = 1.6
@@ -6,18 +6,25 @@ const reach = 1.6
 export interface RuleScale {
   leastUm: number
   mostUm: number
-  /** Gates at the limits, from low to high. */
+  /** Gates at the limits, in µm from low to high. */
   gatesUm: readonly number[]
-  /** Units from the rule's left end. */
+  /** From the left end of the rule, in whatever its width is given in. */
   toX: (valueUm: number) => number
 }
 
-export function ruleScale(tolerance: Tolerance, resultUm: number, width: number): RuleScale {
+/**
+ * The scale of a tolerance rule. A plain tolerance runs from 0; a signed one shows as much beyond either limit; without one the result
+ * decides, and one of 1 µm where there is none.
+ *
+ * @param width of the rule, px on a screen or points on paper
+ */
+export function ruleScale(tolerance: Tolerance, resultUm: number | null, width: number): RuleScale {
   const { leastUm, mostUm, gatesUm } = extent(tolerance, resultUm)
-  return { leastUm, mostUm, gatesUm, toX: (um) => ((um - leastUm) / (mostUm - leastUm)) * width }
+  const toX = (valueUm: number) => ((valueUm - leastUm) / (mostUm - leastUm)) * width
+  return { leastUm, mostUm, gatesUm, toX }
 }
 
-function extent(tolerance: Tolerance, resultUm: number): Omit<RuleScale, 'toX'> {
+function extent(tolerance: Tolerance, resultUm: number | null): Omit<RuleScale, 'toX'> {
   switch (tolerance.kind) {
     case 'plain':
       return { leastUm: 0, mostUm: reach * tolerance.max.valueUm, gatesUm: [tolerance.max.valueUm] }
@@ -28,7 +35,7 @@ function extent(tolerance: Tolerance, resultUm: number): Omit<RuleScale, 'toX'> 
       return { leastUm: least - beyond, mostUm: most + beyond, gatesUm: [least, most] }
     }
     case 'none':
-      return { leastUm: 0, mostUm: reach * (resultUm > 0 ? resultUm : 1), gatesUm: [] }
+      return { leastUm: 0, mostUm: reach * (resultUm && resultUm > 0 ? resultUm : 1), gatesUm: [] }
   }
 }
 
@@ -37,17 +44,18 @@ export interface Graduation {
   major: boolean
 }
 
+/** Between short graduations, and between long ones with their figures: px or points alike. */
 const leastMinor = 5.5
 const leastMajor = 48
 
-/** Graduations in steps of 1, 2 or 5, at least `leastMinor` units apart. */
-export function graduations({ leastUm, mostUm }: RuleScale, width: number): Graduation[] {
-  const perUnit = (mostUm - leastUm) / width
+/** Graduations from `least` to `most` in steps of 1, 2 or 5, as near as can be told apart; in the unit that is shown. */
+export function graduations(least: number, most: number, width: number): Graduation[] {
+  const perUnit = (most - least) / width
   const minor = niceStep(leastMinor * perUnit)
   const major = majorOf(minor, leastMajor * perUnit)
+  const first = Math.ceil(least / minor - 1e-9)
+  const last = Math.floor(most / minor + 1e-9)
   const each = Math.round(major / minor)
-  const first = Math.ceil(leastUm / minor - 1e-9)
-  const last = Math.floor(mostUm / minor + 1e-9)
   return Array.from({ length: last - first + 1 }, (_, i) => first + i).map((n) => ({
     value: n * minor,
     major: n % each === 0,

@@ -1,4 +1,4 @@
-import type { Figure } from '@shared/schemas/results'
+import type { Figure } from '../schemas/results'
 
 export type StoredMap = Figure['map']
 
@@ -16,6 +16,10 @@ export interface HeightField {
   mostUm: number
 }
 
+/**
+ * A stored map ready to be drawn: heights in µm at every place of its grid, and which share of each cell is measured.
+ * A map without a measured place has heights of 0 and a range about them.
+ */
 export function heightField(map: StoredMap): HeightField {
   const { columns, rows, heightsNm } = map
   const heightsUm = Float64Array.from(heightsNm, (nm) => (nm ?? 0) / 1000)
