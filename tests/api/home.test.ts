@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { agreeMeasured, issue, sendMeasured, startWithQa } from './certified'
 import { storePiece, storeReading } from './stored-readings'
 import { type Agent, startTestApp } from './support'
 
@@ -50,6 +51,20 @@ describe('the first page', () => {
     store('sentForReview', tobias.me.id)
     store('agreed')
     expect(ids((await homeOf(tobias.agent)).waiting)).toEqual([first, second])
+  })
+
+  it('shows QA what was agreed and can be certified, the latest of its face only', async () => {
+    const bench = await startWithQa()
+    const early = await agreeMeasured(bench)
+    expect(ids((await homeOf(bench.qa.agent)).waiting)).toEqual([early.id])
+    const late = await agreeMeasured(bench)
+    expect(ids((await homeOf(bench.qa.agent)).waiting)).toEqual([late.id])
+    const both = await bench.signInAs('reviewer', 'qa')
+    const own = await sendMeasured(bench)
+    await both.agent.post(`/api/readings/${own.id}/agree`).expect(200)
+    expect(ids((await homeOf(both.agent)).waiting)).toEqual([])
+    await issue(bench.qa, own.id)
+    expect(ids((await homeOf(bench.qa.agent)).waiting)).toEqual([])
   })
 
   it('shows what lately came out of tolerance, and no verdict on drafts', async () => {

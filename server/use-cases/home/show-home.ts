@@ -31,8 +31,25 @@ function selectWaiting({ db }: AppContext, actor: Actor): ReadingRow[] {
   const mine: (SQL | undefined)[] = []
   if (may(actor.roles, 'reading:review')) mine.push(toReview)
   if (may(actor.roles, 'reading:edit-own')) mine.push(backToMe)
+  if (may(actor.roles, 'certificate:issue')) mine.push(toCertify(actor))
   if (mine.length === 0) return []
   return selectReadingRows(db, { where: or(...mine), orderBy: oldestFirst, limit: rowsEach })
+}
+
+/** Agreed, conforming, the latest of its face, and neither taken nor agreed to by the one who would certify it. */
+function toCertify(actor: Actor): SQL | undefined {
+  const isLatest = sql`NOT EXISTS (
+    SELECT 1 FROM readings AS later
+    WHERE later.piece_id = ${readings.pieceId} AND later.face_id = ${readings.faceId}
+    AND later.number > ${readings.number} AND later.state <> 'setAside'
+  )`
+  return and(
+    eq(readings.state, 'agreed'),
+    inArray(readings.verdict, ['conforms', 'noTolerance']),
+    ne(readings.takenById, actor.id),
+    ne(readings.agreedById, actor.id),
+    isLatest,
+  )
 }
 
 function selectDrafts({ db }: AppContext, actor: Actor): ReadingRow[] {

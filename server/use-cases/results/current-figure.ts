@@ -1,4 +1,5 @@
 import { ENGINE_VERSION } from '@shared/metrology'
+import type { Face } from '@shared/schemas/parts'
 import type { Connection } from '../../db/client'
 import { canonicalJson } from '../../db/events'
 import { AppError } from '../../errors'
@@ -16,8 +17,14 @@ export function selectCurrentFigure(db: Connection, record: ReadingRecord): Resu
   if (result.outcome !== 'figure' || result.engineVersion !== ENGINE_VERSION) return null
   const now = gatherOrNull(db, record)
   if (!now) return null
-  const same = canonicalJson(now) === canonicalJson({ face: result.face, inputs: result.inputs })
-  return same ? result : null
+  const then = { face: result.face, inputs: result.inputs }
+  return canonicalJson(whatCounts(now)) === canonicalJson(whatCounts(then)) ? result : null
+}
+
+/** The face's template is laid on photographs to come; no figure comes from it. */
+function whatCounts<Given extends { face: Face }>({ face, ...rest }: Given) {
+  const { template: _template, ...counted } = face
+  return { ...rest, face: counted }
 }
 
 function gatherOrNull(db: Connection, record: ReadingRecord) {

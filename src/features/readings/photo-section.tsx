@@ -1,4 +1,6 @@
+import type { FaceTemplate } from '@shared/schemas/parts'
 import type { Photo, Reading } from '@shared/schemas/readings'
+import { useMutation } from '@tanstack/react-query'
 import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { toast } from 'sonner'
@@ -6,7 +8,9 @@ import { Button } from '@/components/button'
 import { EmptyState } from '@/components/empty-state'
 import { Section } from '@/components/section'
 import { apiNothing } from '@/lib/api-client'
+import { keepTemplate } from '@/lib/queries/parts'
 import { refreshReadings } from '@/lib/queries/readings'
+import { useMay } from '@/lib/session'
 
 interface Props {
   reading: Reading
@@ -24,8 +28,31 @@ export function PhotoSection({ reading, uploader }: Props) {
           <PhotoFigure key={photo.id} photo={photo} reading={reading} />
         ))}
       </ul>
+      <KeepTemplate reading={reading} />
       {uploader && <div className="mt-6 max-w-[52rem]">{uploader}</div>}
     </Section>
+  )
+}
+
+/** For who may change the part: the next reading's leave-outs are compared with these. */
+function KeepTemplate({ reading: { face, marks } }: { reading: Reading }) {
+  const { t } = useTranslation('readings')
+  const mayEdit = useMay('part:edit')
+  const { outline, leaveOuts } = marks
+  const keep = useMutation({
+    mutationFn: (template: FaceTemplate) => keepTemplate(face.id, template),
+    onSuccess: () => toast(t('page.template.kept')),
+    onError: (error) => toast.error(error.message),
+  })
+  if (!mayEdit || !outline) return null
+  const template = { outline, leaveOuts }
+  if (keep.isSuccess || JSON.stringify(face.template) === JSON.stringify(template)) {
+    return <p className="mt-4 text-muted text-second">{t('page.template.same')}</p>
+  }
+  return (
+    <Button kind="quiet" className="mt-2" disabled={keep.isPending} onClick={() => keep.mutate(template)}>
+      {t('page.template.keep')}
+    </Button>
   )
 }
 

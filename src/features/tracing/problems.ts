@@ -15,7 +15,7 @@ import { centreOfShape, rimOf } from './geometry/shape-path'
 
 /** A mistake that shows in the marks themselves, with its place. Sentences stand under `table:problem.<code>`. */
 export interface Problem {
-  code: 'bandsCross' | 'neighboursDiffer' | 'noNumber' | 'outsideFace' | 'insideLeaveOut'
+  code: 'bandsCross' | 'neighboursDiffer' | 'noNumber' | 'outsideFace' | 'insideLeaveOut' | 'reviewRemark'
   params: Readonly<Record<string, string | number>>
   place: PointPx
   traceIds: readonly string[]

@@ -8,11 +8,13 @@ import { useHeights } from '@/lib/use-heights'
 import { type ChecklistStep, checklist } from './checklist'
 import { flatnessOf } from './panels/figure-head'
 import { partFrameOf } from './part-frame-of'
+import type { Problem } from './problems'
 import type { LineMm } from './result/profile-along'
 import type { Circumstances } from './result/read-marks'
 import { type LivingResult, useLivingResult } from './result/use-living-result'
 import { marksOf } from './table-state'
 import { useTable, useTableStore } from './table-store'
+import { useOpenRemarks } from './use-open-remarks'
 
 /** The figure as it is marked, or as it was sent, and what follows from it for the parts of the page. */
 export function useTableResult(reading: Reading, circumstances: Circumstances) {
@@ -22,6 +24,7 @@ export function useTableResult(reading: Reading, circumstances: Circumstances) {
   const readNow = useLivingResult(store, circumstances)
   const isFinal = !isEditable(reading.state) && reading.fullResult?.figure != null
   const living = useMemo(() => (isFinal ? asSent(reading) : readNow), [isFinal, reading, readNow])
+  const remarks = useOpenRemarks(reading)
   const frame = useMemo(() => partFrameOf(marks.outline, circumstances), [marks.outline, circumstances])
   const figure = living.read?.figure ?? null
   const bandUm = circumstances
@@ -40,11 +43,17 @@ export function useTableResult(reading: Reading, circumstances: Circumstances) {
     figureWords,
     isFinal,
   })
-  return { living, isFinal, frame, figure, bandUm, steps, line: useLine(frame) }
+  return { living: withRemarks(living, remarks), isFinal, frame, figure, bandUm, steps, line: useLine(frame) }
 }
 
 function unitWords({ value, u, unit }: { value: string; u: string; unit: string }): string {
   return `${value} ${u.replace('±', '±\u2009')} ${unit}`
+}
+
+/** The checklist counts mistakes alone; what a reviewer asks is shown beside them. */
+function withRemarks(living: LivingResult, remarks: readonly Problem[]): LivingResult {
+  if (!living.read || remarks.length === 0) return living
+  return { ...living, read: { ...living.read, problems: [...remarks, ...living.read.problems] } }
 }
 
 function asSent({ fullResult }: Reading): LivingResult {

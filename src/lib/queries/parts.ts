@@ -1,5 +1,6 @@
 import {
   customerSchema,
+  type FaceTemplate,
   faceSchema,
   lotSchema,
   type NewCustomer,
@@ -58,6 +59,12 @@ export async function saveFace(partId: string, face: NewFace, id?: string) {
   })
   await refreshParts()
   return saved
+}
+
+/** Outline and leave-outs of a photograph, kept with the face for those to come. */
+export async function keepTemplate(faceId: string, template: FaceTemplate) {
+  await api('PATCH', `/faces/${faceId}`, faceSchema, { body: { template } })
+  await Promise.all([refreshParts(), queryClient.invalidateQueries({ queryKey: queryKeys.readings })])
 }
 
 export async function addLot(lot: NewLot) {
