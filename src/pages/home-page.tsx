@@ -12,12 +12,14 @@ import { Headline } from '@/features/home/headline'
 import { DraftRow, OutRow, WaitingRow } from '@/features/home/home-rows'
 import { formatDay, formatWeekday } from '@/lib/format-when'
 import { useHome } from '@/lib/queries/readings'
+import { useMay } from '@/lib/session'
 import { useDocumentTitle } from '@/lib/use-document-title'
 
 /** What waits for the person, what they were doing, what fell out, what is due. */
 export function HomePage() {
   const { t } = useTranslation('home')
   const home = useHome()
+  const takesReadings = useMay('reading:create')
   useDocumentTitle(t('title'))
   if (home.isPending) return <Loading />
   if (home.isError) return <ErrorState error={home.error} retry={home.refetch} />
@@ -33,11 +35,13 @@ export function HomePage() {
           <WaitingRow key={r.id} reading={r} />
         ))}
       </HomeSection>
-      <HomeSection name="drafts">
-        {drafts.map((r) => (
-          <DraftRow key={r.id} reading={r} />
-        ))}
-      </HomeSection>
+      {takesReadings && (
+        <HomeSection name="drafts">
+          {drafts.map((r) => (
+            <DraftRow key={r.id} reading={r} />
+          ))}
+        </HomeSection>
+      )}
       <HomeSection name="out">
         {outOfTolerance.map((r) => (
           <OutRow key={r.id} reading={r} />

@@ -38,8 +38,8 @@ export function ReviewDeskPage() {
     <>
       <ReviewHead reading={reading.data} />
       <Section title={t('desk.photo')} note={t('desk.photoNote')}>
-        <div className="grid gap-x-8 gap-y-6 pt-4 desk:grid-cols-[minmax(0,1fr)_22rem]">
-          <div className="min-w-0">
+        <div className="flex flex-col gap-6 pt-4 desk:grid desk:grid-cols-[minmax(0,1fr)_22rem] desk:grid-rows-[auto_auto_1fr] desk:gap-x-8">
+          <div className="min-w-0 desk:row-span-3">
             <ReviewPhoto
               reading={reading.data}
               review={review.data}
@@ -48,21 +48,24 @@ export function ReviewDeskPage() {
               newPlace={newPlace ?? null}
               onPlace={mayRemark ? setNewPlace : undefined}
             />
-            <div className="mt-6">
-              <RemarkList
-                reading={reading.data}
-                review={review.data}
-                chosenRemark={chosenRemark}
-                chooseRemark={chooseRemark}
-                newPlace={newPlace}
-                setNewPlace={setNewPlace}
-                mayRemark={mayRemark}
-              />
-            </div>
           </div>
-          <div className="flex min-w-0 flex-col gap-6">
+          {/* Beside the photograph at a desk, right below it on a tablet: what is written stays near its pin. */}
+          <div className="min-w-0 desk:order-1">
+            <RemarkList
+              reading={reading.data}
+              review={review.data}
+              chosenRemark={chosenRemark}
+              chooseRemark={chooseRemark}
+              newPlace={newPlace}
+              setNewPlace={setNewPlace}
+              mayRemark={mayRemark}
+            />
+          </div>
+          <div className="flex min-w-0 flex-col gap-5">
             <ReviewFigure reading={reading.data} />
             <ReviewActions reading={reading.data} review={review.data} />
+          </div>
+          <div className="min-w-0 desk:order-2">
             <LookAtList reading={reading.data} review={review.data} />
           </div>
         </div>

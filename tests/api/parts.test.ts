@@ -172,7 +172,7 @@ describe('a piece', () => {
     expect(refused.body.error.fields.lotId).toMatch(/another part/)
   })
 
-  it('shows its part, its faces and no readings yet', async () => {
+  it('shows its part, its faces, and neither readings nor certificates yet', async () => {
     const { agent, part } = await startWithPart()
     const face = (await agent.post(`/api/parts/${part.id}/faces`).send(ringFace)).body
     const piece = (await addPiece(agent, part.id, '001')).body
@@ -181,6 +181,8 @@ describe('a piece', () => {
       part,
       faces: [face],
       readings: [],
+      dispositions: [],
+      certificates: [],
     })
     expect((await agent.get(`/api/parts/${part.id}`)).body.pieces).toEqual([{ ...piece, latest: null }])
   })

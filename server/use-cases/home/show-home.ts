@@ -60,6 +60,13 @@ function selectDrafts({ db }: AppContext, actor: Actor): ReadingRow[] {
   })
 }
 
+// What the lap has been at since is no news: the reading after it tells.
+const notLappedSince = sql`NOT EXISTS (
+  SELECT 1 FROM readings AS later
+  WHERE later.piece_id = ${readings.pieceId} AND later.face_id = ${readings.faceId}
+  AND later.number > ${readings.number} AND later.lapped_since AND later.state <> 'setAside'
+)`
+
 /** A draft has no verdict yet, and a reading that was sent back has lost its own. */
 function selectOutOfTolerance({ db, now }: AppContext): ReadingRow[] {
   const since = new Date(now().getTime() - recentMs).toISOString()
@@ -73,6 +80,7 @@ function selectOutOfTolerance({ db, now }: AppContext): ReadingRow[] {
       // Of its latest result: an older one may have been mended since.
       eq(results.verdict, 'doesNotConform'),
       inArray(readings.state, ['sentForReview', 'agreed', 'certified']),
+      notLappedSince,
     ),
     limit: rowsEach,
   })
