@@ -12,7 +12,7 @@ function keysInSchemas(): string[] {
 
 describe('every refusal', () => {
   it.each(errorCodes)('%s has a sentence for the person', (code) => {
-    const { error } = new AppError(code, { say: { key: code, params: { minutes: 3 } } }).toBody()
+    const { error } = new AppError(code, { say: { key: code, params: { minutes: 3, number: 2 } } }).toBody()
     expect(error.message).toMatch(/^[A-Z].+\.$/)
     expect(error.message).not.toContain('{{')
   })
