@@ -1,6 +1,6 @@
 import type { Piece } from '@shared/schemas/parts'
 import type { PieceRow } from '@shared/schemas/pieces'
-import { desc, eq, type SQL, sql } from 'drizzle-orm'
+import { count, desc, eq, type SQL, sql } from 'drizzle-orm'
 import { notFound } from '../errors'
 import type { Connection } from './client'
 import type { PageMark } from './paging'
@@ -35,6 +35,19 @@ export function selectPieces(db: Connection, where: SQL | undefined, limit: numb
     .orderBy(desc(pieces.createdAt), desc(pieces.id))
     .limit(limit)
     .all()
+}
+
+/** How many pieces match. */
+export function countPieces(db: Connection, where: SQL | undefined): number {
+  const counted = db
+    .select({ total: count() })
+    .from(pieces)
+    .innerJoin(parts, eq(parts.id, pieces.partId))
+    .innerJoin(customers, eq(customers.id, parts.customerId))
+    .leftJoin(lots, eq(lots.id, pieces.lotId))
+    .where(where)
+    .get()
+  return counted?.total ?? 0
 }
 
 export function requirePiece(db: Connection, id: string): Piece {

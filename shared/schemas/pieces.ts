@@ -15,7 +15,12 @@ export const pieceListQuerySchema = z.object({
   before: z.string().max(200).optional(),
 })
 export type PieceListQuery = z.infer<typeof pieceListQuerySchema>
-export const pieceListSchema = z.object({ rows: z.array(pieceRowSchema), next: z.string().nullable() })
+export const pieceListSchema = z.object({
+  rows: z.array(pieceRowSchema),
+  next: z.string().nullable(),
+  /** How many there are in all. */
+  total: z.number().int(),
+})
 export type PieceList = z.infer<typeof pieceListSchema>
 
 export const piecePageSchema = z.object({

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { certificateRowSchema } from './certificates'
 import { customerSchema, partSchema, pieceSchema } from './parts'
 import { readingRowSchema } from './readings'
 
@@ -10,5 +11,6 @@ export const foundSchema = z.object({
   pieces: z.array(pieceSchema),
   readings: z.array(readingRowSchema),
   customers: z.array(customerSchema),
+  certificates: z.array(certificateRowSchema),
 })
 export type Found = z.infer<typeof foundSchema>

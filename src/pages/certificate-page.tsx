@@ -5,6 +5,7 @@ import { Loading } from '@/components/loading'
 import { PrintedPage } from '@/components/printed-page'
 import { Section } from '@/components/section'
 import { CertificateHead } from '@/features/certificates/certificate-head'
+import { EventsSection } from '@/features/readings/events-section'
 import { useCertificate, useCertificatePage } from '@/lib/queries/certificates'
 import { useDocumentTitle } from '@/lib/use-document-title'
 
@@ -31,6 +32,7 @@ export function CertificatePage() {
           )}
         </div>
       </Section>
+      <EventsSection of="certificate" id={id} />
     </>
   )
 }

@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next'
+import { Button } from '@/components/button'
 import { EmptyState } from '@/components/empty-state'
 import { ErrorState } from '@/components/error-state'
 import { FilterBar } from '@/components/filter-bar'
@@ -10,6 +11,7 @@ import { PageHead } from '@/components/page-head'
 import { LineHeads } from '@/components/readings/line-heads'
 import { PieceLine } from '@/components/readings/piece-line'
 import { Section } from '@/components/section'
+import { queryString } from '@/lib/api-client'
 import { usePieceList } from '@/lib/queries/pieces'
 import { useDocumentTitle } from '@/lib/use-document-title'
 import { useFilterParams } from '@/lib/use-filter-params'
@@ -17,10 +19,24 @@ import { useFilterParams } from '@/lib/use-filter-params'
 export function PiecesPage() {
   const { t } = useTranslation('pieces')
   const filters = useFilterParams()
+  const search = filters.get('search') || undefined
+  const total = usePieceList({ search }).data?.pages[0].total
   useDocumentTitle(t('title'))
   return (
     <>
-      <PageHead title={t('title')} actions={<NewReadingLink />} />
+      <PageHead
+        title={t('title')}
+        actions={
+          <>
+            <Button asChild>
+              <a href={`/api/pieces.csv${queryString({ search })}`} download>
+                {t('csv')}
+              </a>
+            </Button>
+            <NewReadingLink />
+          </>
+        }
+      />
       <FilterBar>
         <ListSearch
           label={t('search')}
@@ -31,7 +47,15 @@ export function PiecesPage() {
       <div className="desk:pl-margin">
         <LineHeads what={t('heads.what')} when={t('heads.when')} />
       </div>
-      <Section title={t('list.title')} note={t('list.note')}>
+      <Section
+        title={t('list.title')}
+        note={
+          <>
+            {t('list.note')}
+            {total !== undefined && <span className="block">{t('count', { count: total })}</span>}
+          </>
+        }
+      >
         <PieceRows search={filters.get('search')} />
       </Section>
     </>

@@ -42,7 +42,7 @@ export function ReadingPage() {
       <PhotoSection reading={query.data} uploader={mayEdit && <PhotoUploader readingId={id} />} />
       <SetUpSection reading={query.data} change={mayEdit && <ChangeSetUp reading={query.data} />} />
       <ConditionsSection reading={query.data} />
-      <EventsSection readingId={id} />
+      <EventsSection of="reading" id={id} />
     </>
   )
 }

@@ -75,7 +75,7 @@ export function ReviewDeskPage() {
       {figure && <BudgetSection figure={figure} />}
       <SetUpSection reading={reading.data} />
       <ConditionsSection reading={reading.data} />
-      <EventsSection readingId={id} />
+      <EventsSection of="reading" id={id} />
     </>
   )
 }

@@ -27,6 +27,7 @@ const promised = `
   PATCH  /faces/:id                     part:edit
   POST   /lots                          piece:create
   GET    /pieces                        shop:read
+  GET    /pieces.csv                    shop:read
   POST   /pieces                        piece:create
   GET    /pieces/:id                    shop:read
   GET    /equipment                     shop:read

@@ -73,6 +73,9 @@ describe('a table as CSV', () => {
     expect(rest).toBe('')
     const certificates = await bench.qa.agent.get('/api/certificates.csv').expect(200)
     expect(certificates.text).toContain('FC-2026-0001')
+    const pieces = await bench.qa.agent.get(`/api/pieces.csv?search=${reading.serial}`).expect(200)
+    expect(pieces.text).toContain(`${reading.serial},`)
+    expect(pieces.text).toContain('certified')
     const none = await bench.qa.agent.get('/api/certificates.csv?state=withdrawn').expect(200)
     expect(none.text).not.toContain('FC-2026-0001')
   })
@@ -87,6 +90,8 @@ describe('the list of certificates', () => {
       const { body } = await bench.qa.agent.get(`/api/certificates?search=${word}`).expect(200)
       expect([word, body.total, body.rows[0]?.number]).toEqual([word, 1, number])
     }
+    const found = await bench.qa.agent.get(`/api/search?q=${number}`).expect(200)
+    expect(found.body.certificates).toMatchObject([{ number, state: 'issued' }])
     const { body } = await bench.qa.agent.get('/api/certificates?search=nothing').expect(200)
     expect([body.total, body.rows, body.next]).toEqual([0, [], null])
   })

@@ -155,6 +155,6 @@ describe('the search', () => {
   it('finds nothing for nothing', async () => {
     const { maren } = await startWithPiece()
     const found = (await maren.agent.get('/api/search').query({ q: ' ' })).body
-    expect(found).toEqual({ parts: [], pieces: [], readings: [], customers: [] })
+    expect(found).toEqual({ parts: [], pieces: [], readings: [], customers: [], certificates: [] })
   })
 })

@@ -1,6 +1,6 @@
 import type { CertificateListQuery } from '@shared/schemas/certificates'
 import type { AppContext } from '../../context'
-import { writeCsv } from '../../csv/write-csv'
+import { heightCell, writeCsv } from '../../csv/write-csv'
 import { words } from '../../i18n'
 import { selectCertificatesThat } from './select-certificates'
 
@@ -30,8 +30,8 @@ export function exportCertificates({ db }: AppContext, query: CertificateListQue
     row.serial,
     row.lotNumber,
     row.customerName,
-    Math.round(row.flatnessUm * 1000) / 1000,
-    Math.round(row.expandedUncertaintyUm * 1000) / 1000,
+    heightCell(row.flatnessUm),
+    heightCell(row.expandedUncertaintyUm),
     words('csv', `verdict.${row.verdict}`),
     row.issuedBy.name,
     row.issuedAt,

@@ -2,7 +2,7 @@ import type { ReadingListQuery, ReadingRow } from '@shared/schemas/readings'
 import { isEditable } from '@shared/workflow/reading-states'
 import type { Actor } from '../../auth/actor'
 import type { AppContext } from '../../context'
-import { type CsvCell, writeCsv } from '../../csv/write-csv'
+import { type CsvCell, heightCell, writeCsv } from '../../csv/write-csv'
 import { newestFirst, oldestFirst, selectReadingRows } from '../../db/reading-rows'
 import { words } from '../../i18n'
 import { readingsThat } from './list-readings'
@@ -44,15 +44,10 @@ function cellsOf(row: ReadingRow): CsvCell[] {
     row.customerName,
     row.number,
     words('csv', `state.${state}`),
-    rounded(result?.flatnessUm),
-    rounded(result?.expandedUncertaintyUm),
+    heightCell(result?.flatnessUm),
+    heightCell(result?.expandedUncertaintyUm),
     result && !isEditable(state) ? words('csv', `verdict.${result.verdict}`) : null,
     row.takenBy.name,
     row.createdAt,
   ]
-}
-
-/** To a nanometre: no figure is better. */
-function rounded(um: number | null | undefined): number | null {
-  return um === null || um === undefined ? null : Math.round(um * 1000) / 1000
 }

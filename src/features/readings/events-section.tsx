@@ -5,11 +5,16 @@ import { formatMoment } from '@/lib/format-when'
 import { useEvents } from '@/lib/queries/readings'
 import { useMay } from '@/lib/session'
 
-/** Who did what to this reading, for those who may read the trail. */
-export function EventsSection({ readingId }: { readingId: string }) {
+interface Props {
+  of: 'reading' | 'certificate'
+  id: string
+}
+
+/** Who did what to it, for those who may read the trail. */
+export function EventsSection({ of, id }: Props) {
   const { t, i18n } = useTranslation('readings')
   const mayRead = useMay('event:read')
-  const events = useEvents('reading', readingId, mayRead)
+  const events = useEvents(of, id, mayRead)
   if (!mayRead) return null
   const words = (kind: string) => {
     // A dot in a key would part it.

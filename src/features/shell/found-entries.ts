@@ -3,7 +3,7 @@ import type { TFunction } from 'i18next'
 
 export interface FoundEntry {
   key: string
-  group: 'pieces' | 'parts' | 'readings' | 'customers'
+  group: 'pieces' | 'parts' | 'readings' | 'certificates' | 'customers'
   to: string
   main: string
   note: string
@@ -32,6 +32,13 @@ export function foundEntries(found: Found, t: TFunction): FoundEntry[] {
       to: `/readings/${reading.id}`,
       main: t('nav:search.reading', { number: reading.number }),
       note: `${reading.partNumber} · ${reading.serial}, ${t(`common:state.${reading.state}`)}`,
+    })),
+    ...found.certificates.map((certificate) => ({
+      key: certificate.id,
+      group: 'certificates' as const,
+      to: `/certificates/${certificate.id}`,
+      main: certificate.number,
+      note: `${certificate.partNumber} · ${certificate.serial}, ${t(`certificate:state.${certificate.state}`)}`,
     })),
     ...found.customers.map((customer) => ({
       key: customer.id,
