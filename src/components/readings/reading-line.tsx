@@ -75,7 +75,8 @@ function LineFigure({ reading: { result, marksVersion } }: { reading: ReadingRow
 function LineVerdict({ reading }: { reading: ReadingRow }) {
   const { t } = useTranslation()
   const tolerance = useToleranceWords()(reading.face.tolerance)
-  const isSettled = !isEditable(reading.state) && reading.result !== null
+  // What was set aside counts for nothing, whatever its figure.
+  const isSettled = !isEditable(reading.state) && reading.state !== 'setAside' && reading.result !== null
   return (
     <div className="min-w-0">
       {isSettled && reading.result ? (
