@@ -26,6 +26,7 @@ const statusOf = {
   notAgreed: 409,
   countsNoMore: 409,
   certificateEnded: 409,
+  photographMissing: 500,
   lastAdministrator: 409,
   ownDeactivation: 409,
   tooLarge: 413,

@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises'
 import type { CertificateSnapshot } from '@shared/schemas/certificates'
 import type { PageDescription } from '@shared/schemas/page-description'
 import type { AppContext } from '../../context'
+import { AppError } from '../../errors'
 import { layoutCertificate } from '../../pdf/certificate-page'
 import { drawMapColours } from '../../pdf/map-colours'
 import { createMeasure } from '../../pdf/measure-text'
@@ -19,10 +20,18 @@ export async function describeCertificate(
   snapshot: CertificateSnapshot,
 ): Promise<PageDescription> {
   const [photo, map] = await Promise.all([
-    photographForPage(await readFile(storage.pathOf(snapshot.photo.sha256))),
+    photographForPage(await readPhotograph(storage.pathOf(snapshot.photo.sha256))),
     drawMapColours(snapshot.figure.map),
   ])
   return layoutCertificate(snapshot, { photo, map }, createMeasure())
+}
+
+async function readPhotograph(path: string): Promise<Buffer> {
+  try {
+    return await readFile(path)
+  } catch (cause) {
+    throw new AppError('photographMissing', { log: `${path}: ${cause}` })
+  }
 }
 
 /** The certificate as a PDF. */
