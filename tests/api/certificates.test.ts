@@ -1,5 +1,6 @@
 import { spawnSync } from 'node:child_process'
 import { createHash } from 'node:crypto'
+import { rmSync } from 'node:fs'
 import type { Certificate } from '@shared/schemas/certificates'
 import { eq } from 'drizzle-orm'
 import { describe, expect, it } from 'vitest'
@@ -147,6 +148,25 @@ describe('what was issued', () => {
       .put(`/api/readings/${reading.id}/marks`)
       .send({ basedOnVersion: 1, marks: reading.marks })
     expect([put.status, put.body.error.code]).toEqual([409, 'notEditable'])
+  })
+})
+
+describe('a photograph whose file is gone from the disk', () => {
+  it('leaves the PDF as it was issued, and the print view says what is missing', async () => {
+    const bench = await startWithQa()
+    const reading = await agreeMeasured(bench)
+    const { id } = await issue(bench.qa, reading.id)
+    rmSync(bench.context.storage.pathOf(reading.photos[0].sha256))
+    await bench.qa.agent.get(`/api/certificates/${id}/pdf`).expect(200)
+    const page = await bench.qa.agent.get(`/api/certificates/${id}/page`)
+    expect([page.status, page.body.error.code]).toEqual([500, 'photographMissing'])
+    const other = await agreeMeasured(bench)
+    rmSync(bench.context.storage.pathOf(other.photos[0].sha256), { force: true })
+    const refused = await bench.qa.agent
+      .post(`/api/readings/${other.id}/certificate`)
+      .send({ password: testPassword })
+    expect([refused.status, refused.body.error.code]).toEqual([500, 'photographMissing'])
+    expect(bench.context.db.select().from(certificates).all()).toHaveLength(1)
   })
 })
 

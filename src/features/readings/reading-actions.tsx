@@ -17,10 +17,11 @@ export function ReadingActions({ reading }: { reading: Reading }) {
   const move = useMove(reading.id)
   const [asking, setAsking] = useState(false)
   const { id, mayEdit, maySend, state, photos, face, marks } = reading
+  const hasFigure = reading.fullResult?.figure != null && !reading.figureIsStale
   const departs = departuresFromFace(face, marks).length > 0
   return (
     <>
-      {maySend && (
+      {maySend && hasFigure && (
         <Button disabled={move.isPending} onClick={() => (departs ? setAsking(true) : move.mutate('send'))}>
           {t('page.send')}
         </Button>
