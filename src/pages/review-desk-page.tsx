@@ -11,6 +11,7 @@ import { ConditionsSection, SetUpSection } from '@/features/readings/set-up-sect
 import { FaceReadings } from '@/features/review/face-readings'
 import { LookAtList } from '@/features/review/look-at-list'
 import { RemarkList } from '@/features/review/remark-list'
+import { ResidualPicture } from '@/features/review/residual-picture'
 import { ReviewActions } from '@/features/review/review-actions'
 import { ReviewFigure } from '@/features/review/review-figure'
 import { ReviewHead } from '@/features/review/review-head'
@@ -67,6 +68,9 @@ export function ReviewDeskPage() {
           </div>
           <div className="min-w-0 desk:order-2">
             <LookAtList reading={reading.data} review={review.data} />
+            <div className="mt-4">
+              <ResidualPicture reading={reading.data} />
+            </div>
           </div>
         </div>
       </Section>

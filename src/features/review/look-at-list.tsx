@@ -8,6 +8,7 @@ import { findingWords } from '@/lib/finding-words'
 import { formatDay } from '@/lib/format-when'
 import { useEquipment } from '@/lib/queries/equipment'
 import { equipmentTroubles, leftOut, othersThatCount } from './look-at'
+import { summariseResiduals } from './residuals'
 
 interface Row {
   name: string
@@ -24,6 +25,7 @@ export function LookAtList({ reading, review }: { reading: Reading; review: Revi
     ...departureRows(t, reading, review),
     leftOutRow(t, reading),
     supportedRow(t, reading),
+    residualRow(t, reading),
     pressRow(t, reading),
     conditionsRow(t, reading),
     {
@@ -96,6 +98,19 @@ function supportedRow(t: Words, { fullResult }: Reading): Row {
     name: t('look.supported'),
     value: t('look.supportedValue', { percent: Math.floor(share * 100) }),
     isGrave: share < wellSupported,
+  }
+}
+
+function residualRow(t: Words, reading: Reading): Row {
+  const name = t('look.residuals')
+  const summary = summariseResiduals(reading)
+  if (!summary) return { name, value: t('look.residualsNone'), isGrave: true }
+  const { rmsPx, farthestPx, setAside } = summary
+  const value = t('look.residualsValue', { rms: rmsPx.toFixed(2), farthest: farthestPx.toFixed(1) })
+  return {
+    name,
+    value: setAside > 0 ? `${value}; ${t('look.residualsSetAside', { count: setAside })}` : value,
+    isGrave: setAside > 0,
   }
 }
 

@@ -5,9 +5,7 @@ import { useTranslation } from 'react-i18next'
 import { EmptyState } from '@/components/empty-state'
 import { CheckboxField } from '@/components/fields/checkbox-field'
 import { MarkedPhoto, type PhotoPin } from '@/components/marked-photo'
-
-/** Clicks so far from their band are drawn darkest, px. */
-const residualScalePx = 3
+import { residualScalePx, residualsByTrace } from './residuals'
 
 export interface Place {
   x: number
@@ -32,10 +30,7 @@ export function ReviewPhoto(props: Props) {
   const [showMarks, setShowMarks] = useState(true)
   const [showResiduals, setShowResiduals] = useState(false)
   const photo = reading.photos.find(({ role }) => role === 'bands')
-  const residuals = useMemo(
-    () => new Map(reading.fullResult?.figure?.residuals.map((r) => [r.traceId, r.residualsPx])),
-    [reading.fullResult],
-  )
+  const residuals = useMemo(() => residualsByTrace(reading), [reading])
   if (!photo) return <EmptyState>{t('desk.noPhoto')}</EmptyState>
   const pins = [
     ...pinsOf(review, chosenRemark, (number) => t('remarks.pin', { number })),
