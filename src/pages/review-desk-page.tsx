@@ -19,11 +19,13 @@ import { type Place, ReviewPhoto } from '@/features/review/review-photo'
 import { useReading } from '@/lib/queries/readings'
 import { useReview } from '@/lib/queries/reviews'
 import { useDocumentTitle } from '@/lib/use-document-title'
+import { useIsDesk } from '@/lib/use-is-desk'
 
 /** One reading before a reviewer: photograph, figure, what to look at, remarks, and the decision. */
 export function ReviewDeskPage() {
   const { id = '' } = useParams()
   const { t } = useTranslation('review')
+  const isDesk = useIsDesk()
   const reading = useReading(id)
   const review = useReview(id)
   const [chosenRemark, chooseRemark] = useState<string | null>(null)
@@ -35,6 +37,11 @@ export function ReviewDeskPage() {
   const mayRemark =
     review.data.mayReview && review.data.refusal !== 'ownReading' && reading.data.state === 'sentForReview'
   const figure = reading.data.fullResult?.figure
+  const residuals = (
+    <div className="mt-5 max-w-[24rem]">
+      <ResidualPicture reading={reading.data} />
+    </div>
+  )
   return (
     <>
       <ReviewHead reading={reading.data} />
@@ -49,6 +56,7 @@ export function ReviewDeskPage() {
               newPlace={newPlace ?? null}
               onPlace={mayRemark ? setNewPlace : undefined}
             />
+            {isDesk && residuals}
           </div>
           {/* Beside the photograph at a desk, right below it on a tablet: what is written stays near its pin. */}
           <div className="min-w-0 desk:order-1">
@@ -68,9 +76,7 @@ export function ReviewDeskPage() {
           </div>
           <div className="min-w-0 desk:order-2">
             <LookAtList reading={reading.data} review={review.data} />
-            <div className="mt-4">
-              <ResidualPicture reading={reading.data} />
-            </div>
+            {!isDesk && residuals}
           </div>
         </div>
       </Section>

@@ -17,10 +17,13 @@ export function SetUpSection({ reading: { setUp }, change }: Props) {
   const { t } = useTranslation('readings')
   const equipment = useEquipment()
   const named = (id: string | null) => nameOf(equipment.data?.rows ?? [], id) ?? t('common:notStated')
-  const angle =
-    setUp.viewingAngleDeg === null
+  const camera = equipment.data?.rows.find(({ id }) => id === setUp.cameraSetUpId)?.details
+  const ofCamera = setUp.viewingAngleDeg === null && camera?.kind === 'cameraSetUp' ? camera : null
+  const angle = ofCamera
+    ? t('page.setUp.ofCamera', { angle: angleWords(ofCamera.viewingAngleDeg, ofCamera.viewingAngleUDeg) })
+    : setUp.viewingAngleDeg === null
       ? t('common:notStated')
-      : `${setUp.viewingAngleDeg}°${setUp.viewingAngleUDeg === null ? '' : ` ± ${setUp.viewingAngleUDeg}°`}`
+      : angleWords(setUp.viewingAngleDeg, setUp.viewingAngleUDeg)
   return (
     <Section title={t('page.setUp.title')}>
       <div className="flex flex-wrap items-start justify-between gap-4 pt-3">
@@ -38,6 +41,10 @@ export function SetUpSection({ reading: { setUp }, change }: Props) {
       </div>
     </Section>
   )
+}
+
+function angleWords(deg: number, uDeg: number | null): string {
+  return uDeg === null ? `${deg}°` : `${deg}° ± ${uDeg}°`
 }
 
 function nameOf(rows: readonly Equipment[], id: string | null): string | undefined {
