@@ -89,6 +89,7 @@ export const certificateRowSchema = z.object({
   state: certificateStateSchema,
   pieceId: z.string(),
   readingId: z.string(),
+  faceId: z.string(),
   partNumber: z.string(),
   partName: z.string(),
   serial: z.string(),

@@ -7,6 +7,7 @@ import { describe, expect, it } from 'vitest'
 import { verifyChain } from '../../server/db/events'
 import { newId } from '../../server/db/ids'
 import { certificatePdfs, certificates } from '../../server/db/schema/certificates'
+import { pieces } from '../../server/db/schema/parts'
 import { readingPhotos, readings } from '../../server/db/schema/readings'
 import { agreeMeasured, type CertificateBench, issue, sendMeasured, startWithQa } from './certified'
 import { testPassword } from './support'
@@ -164,7 +165,7 @@ describe('a photograph whose file is gone from the disk', () => {
     rmSync(bench.context.storage.pathOf(other.photos[0].sha256), { force: true })
     const refused = await bench.qa.agent
       .post(`/api/readings/${other.id}/certificate`)
-      .send({ password: testPassword })
+      .send({ password: testPassword, replacesId: id })
     expect([refused.status, refused.body.error.code]).toEqual([500, 'photographMissing'])
     expect(bench.context.db.select().from(certificates).all()).toHaveLength(1)
   })
@@ -205,6 +206,11 @@ describe('a replacement', () => {
     expect(second.replaces).toEqual({ id: first.id, number: first.number })
     const old = await bench.qa.agent.get(`/api/certificates/${first.id}`).expect(200)
     expect(old.body).toMatchObject({ state: 'replaced', replacedBy: { number: second.number } })
+    const another = await agreeMeasured(bench)
+    const beside = await bench.qa.agent
+      .post(`/api/readings/${another.id}/certificate`)
+      .send({ password: testPassword })
+    expect([beside.status, beside.body.error.code]).toEqual([409, 'alreadyCertified'])
     const third = await bench.qa.agent
       .post(`/api/readings/${reading.id}/certificate`)
       .send({ password: testPassword, replacesId: first.id })
@@ -288,15 +294,21 @@ describe('a server that is killed while it issues a certificate', () => {
   )
 })
 
-/** More agreed readings of the same face, with the same figure. */
+/** Agreed readings of more pieces, with the same figure. */
 function copiesOf({ context: { db } }: CertificateBench, readingId: string, count: number): string[] {
   const original = db.select().from(readings).where(eq(readings.id, readingId)).get()
   const photo = db.select().from(readingPhotos).where(eq(readingPhotos.readingId, readingId)).get()
   if (!original || !photo) throw new Error('nothing to copy')
+  const piece = db.select().from(pieces).where(eq(pieces.id, original.pieceId)).get()
+  if (!piece) throw new Error('nothing to copy')
   return Array.from({ length: count }, (_, i) => {
     const id = newId()
+    const pieceId = newId()
+    db.insert(pieces)
+      .values({ ...piece, id: pieceId, serial: `copy ${i}` })
+      .run()
     db.insert(readings)
-      .values({ ...original, id, number: original.number + 1 + i })
+      .values({ ...original, id, pieceId })
       .run()
     db.insert(readingPhotos)
       .values({ ...photo, id: newId(), readingId: id })

@@ -2,9 +2,10 @@ import { and, eq } from 'drizzle-orm'
 import type { Actor } from '../../auth/actor'
 import type { Connection } from '../../db/client'
 import { certificates } from '../../db/schema/certificates'
+import { readings } from '../../db/schema/readings'
 import { readSettings } from '../../db/settings'
 import { AppError, notFound } from '../../errors'
-import type { ReadingRecord } from '../readings/reading-record'
+import { type ReadingRecord, requireReading } from '../readings/reading-record'
 import { selectFaceReadings } from '../reviews/face-readings'
 
 export type CertificateRecord = typeof certificates.$inferSelect
@@ -24,13 +25,13 @@ export function assertCertifiable(
 ): void {
   assertApart(db, actor, reading)
   if (replaced && replaced.state !== 'issued') throw new AppError('certificateEnded')
-  if (replaced && replaced.pieceId !== reading.pieceId) throw notFound('certificate')
+  if (replaced && !isOfFace(db, replaced, reading)) throw notFound('certificate')
   if (reading.state !== 'agreed' && reading.state !== 'certified') {
     throw new AppError('notAgreed', { details: { state: reading.state } })
   }
-  const standing = standingCertificate(db, reading.id)
-  if (standing && standing.id !== replaced?.id) throw new AppError('alreadyCertified')
   assertAlone(db, reading)
+  const standing = standingCertificate(db, reading)
+  if (standing && standing.id !== replaced?.id) throw new AppError('alreadyCertified')
 }
 
 /** Taking, agreeing and certifying are three people's work, save in a one-person shop. */
@@ -40,11 +41,26 @@ function assertApart(db: Connection, actor: Actor, reading: ReadingRecord): void
   if (reading.agreedById === actor.id) throw new AppError('agreedAlone')
 }
 
-function standingCertificate(db: Connection, readingId: string): { id: string } | undefined {
+type FaceOfPiece = Pick<ReadingRecord, 'pieceId' | 'faceId'>
+
+function isOfFace(
+  db: Connection,
+  { readingId }: CertificateRecord,
+  { pieceId, faceId }: FaceOfPiece,
+): boolean {
+  const certified = requireReading(db, readingId)
+  return certified.pieceId === pieceId && certified.faceId === faceId
+}
+
+/** A face of a piece has one certificate that stands at the most, of whichever reading. */
+function standingCertificate(db: Connection, { pieceId, faceId }: FaceOfPiece): { id: string } | undefined {
   return db
     .select({ id: certificates.id })
     .from(certificates)
-    .where(and(eq(certificates.readingId, readingId), eq(certificates.state, 'issued')))
+    .innerJoin(readings, eq(readings.id, certificates.readingId))
+    .where(
+      and(eq(certificates.pieceId, pieceId), eq(readings.faceId, faceId), eq(certificates.state, 'issued')),
+    )
     .get()
 }
 

@@ -22,6 +22,7 @@ const columns = {
   state: certificates.state,
   pieceId: certificates.pieceId,
   readingId: certificates.readingId,
+  faceId: readings.faceId,
   partNumber: parts.number,
   partName: parts.name,
   serial: pieces.serial,

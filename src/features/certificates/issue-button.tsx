@@ -17,13 +17,13 @@ export function IssueButton({ reading, certificates }: Props) {
   const { t } = useTranslation('certificate')
   const mayIssue = useMay('certificate:issue')
   const [isOpen, setOpen] = useState(false)
-  const own = certificates.find(({ readingId, state }) => readingId === reading.id && state === 'issued')
-  const standing = own ?? certificates.find(({ state }) => state === 'issued') ?? null
+  const standing =
+    certificates.find(({ faceId, state }) => faceId === reading.face.id && state === 'issued') ?? null
   const isSettled = reading.state === 'agreed' || reading.state === 'certified'
   if (!mayIssue || !isSettled) return null
   return (
     <>
-      <Button kind={own ? 'plain' : 'main'} onClick={() => setOpen(true)}>
+      <Button kind={standing?.readingId === reading.id ? 'plain' : 'main'} onClick={() => setOpen(true)}>
         {standing ? t('issue.openReplacing') : t('issue.open')}
       </Button>
       {isOpen && <IssueDialog reading={reading} replaced={standing} onClose={() => setOpen(false)} />}
