@@ -19,15 +19,20 @@ export function NewReadingPage() {
   const { t } = useTranslation('readings')
   const [params, setParams] = useSearchParams()
   const readingId = params.get('reading')
+  const corrects = params.get('corrects')
   const mayStart = useMay('reading:create')
   useDocumentTitle(t('new.title'))
   if (!mayStart) return <EmptyState>{t('errors:notAllowed')}</EmptyState>
   if (readingId) return <PhotographsStep readingId={readingId} />
   return (
     <>
-      <PageHead title={t('new.title')} />
+      <PageHead title={t('new.title')}>
+        {corrects && <p className="mt-1 text-muted">{t('new.corrects')}</p>}
+      </PageHead>
       <StartReadingForm
         pieceId={params.get('piece') ?? ''}
+        faceId={params.get('face') ?? ''}
+        correctsId={corrects}
         onStarted={(reading) => setParams({ reading: reading.id }, { replace: true })}
         renderAddPiece={(onAdded) => <AddPiece onAdded={onAdded} />}
       />

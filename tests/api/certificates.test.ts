@@ -193,6 +193,17 @@ describe('a withdrawal', () => {
   })
 })
 
+describe('a certified reading that turns out wrong', () => {
+  it('is corrected by a new one that names it, whatever that one says', async () => {
+    const bench = await startWithQa()
+    const wrong = await agreeMeasured(bench, 1)
+    const first = await issue(bench.qa, wrong.id)
+    const right = await agreeMeasured(bench, 3, { correctsId: wrong.id })
+    const second = await issue(bench.qa, right.id, { replacesId: first.id })
+    expect([second.verdict, second.replaces?.number]).toEqual(['doesNotConform', first.number])
+  })
+})
+
 describe('a replacement', () => {
   it('ends the old one in the same step, and each names the other', async () => {
     const bench = await startWithQa()

@@ -7,6 +7,7 @@ import { candidateResolver } from '@/lib/candidate-resolver'
 export interface NewReadingForm {
   pieceId: string
   faceId: string
+  correctsId: string | null
   lappedSince: boolean
   lightSourceId: string
   referenceFlatId: string
@@ -30,6 +31,7 @@ export interface NewReadingForm {
 export const blankReading: NewReadingForm = {
   pieceId: '',
   faceId: '',
+  correctsId: null,
   lappedSince: false,
   lightSourceId: '',
   referenceFlatId: '',
@@ -64,6 +66,7 @@ function candidateOf(form: NewReadingForm): unknown {
   return {
     pieceId: form.pieceId,
     faceId: form.faceId,
+    correctsId: form.correctsId,
     lappedSince: form.lappedSince,
     setUp: {
       lightSourceId: form.lightSourceId || null,
@@ -99,6 +102,7 @@ export function formOf({ pieceId, face, setUp, conditions }: Reading): NewReadin
   return {
     pieceId,
     faceId: face.id,
+    correctsId: null,
     lappedSince: false,
     lightSourceId: setUp.lightSourceId ?? '',
     referenceFlatId: setUp.referenceFlatId ?? '',

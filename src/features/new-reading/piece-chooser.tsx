@@ -26,6 +26,7 @@ export function PieceChooser({ renderAddPiece }: Props) {
   const choose = (id: string) => {
     form.setValue('pieceId', id, { shouldValidate: form.formState.isSubmitted })
     form.setValue('faceId', '')
+    form.setValue('correctsId', null)
   }
   return (
     <Section title={t('new.piece.title')} note={t('new.piece.note')}>

@@ -16,18 +16,22 @@ import { useOnlyEquipment } from './use-only-equipment'
 interface Props {
   /** Chosen before the page opened, such as on the piece's page. */
   pieceId: string
+  /** Chosen before as well, where a reading of it is corrected; '' otherwise. */
+  faceId: string
+  /** The reading that the new one corrects. */
+  correctsId: string | null
   onStarted: (reading: Reading) => void
   /** Opens whatever adds a piece; gives its id back. */
   renderAddPiece: (onAdded: (pieceId: string) => void) => ReactNode
 }
 
 /** Piece and face, what it is photographed with, conditions; then the reading is started. */
-export function StartReadingForm({ pieceId, onStarted, renderAddPiece }: Props) {
+export function StartReadingForm({ pieceId, faceId, correctsId, onStarted, renderAddPiece }: Props) {
   const { t } = useTranslation('readings')
   const equipment = useEquipment()
   const form = useForm<NewReadingForm, unknown, NewReading>({
     resolver: newReadingResolver,
-    defaultValues: { ...blankReading, pieceId },
+    defaultValues: { ...blankReading, pieceId, faceId, correctsId },
   })
   useOnlyEquipment(form, equipment.data?.rows)
   const { errors, isSubmitting } = form.formState

@@ -1,4 +1,5 @@
 import { type Reading, readingSchema } from '@shared/schemas/readings'
+import { isEditable } from '@shared/workflow/reading-states'
 import { departuresFromFace } from '@shared/workflow/template-departures'
 import { useMutation } from '@tanstack/react-query'
 import { useState } from 'react'
@@ -10,14 +11,17 @@ import { DepartureDialog } from '@/components/departure-dialog'
 import { api } from '@/lib/api-client'
 import { refreshReadings } from '@/lib/queries/readings'
 import { sendReading } from '@/lib/queries/reviews'
+import { useMay } from '@/lib/session'
 
 /** What the one who took it may do with a reading as it stands. */
 export function ReadingActions({ reading }: { reading: Reading }) {
   const { t } = useTranslation('readings')
   const move = useMove(reading.id)
   const [asking, setAsking] = useState(false)
-  const { id, mayEdit, maySend, state, photos, face, marks } = reading
+  const { id, mayEdit, maySend, state, photos, face, marks, pieceId } = reading
   const hasFigure = reading.fullResult?.figure != null && !reading.figureIsStale
+  // What has left draft is never changed: a correction is a new reading that names it.
+  const mayCorrect = useMay('reading:create') && !isEditable(state)
   const departs = departuresFromFace(face, marks).length > 0
   return (
     <>
@@ -39,6 +43,13 @@ export function ReadingActions({ reading }: { reading: Reading }) {
           }}
           onClose={() => setAsking(false)}
         />
+      )}
+      {mayCorrect && (
+        <Button asChild>
+          <Link to={`/readings/new?piece=${pieceId}&face=${face.id}&corrects=${id}`}>
+            {t('page.correct')}
+          </Link>
+        </Button>
       )}
       {mayEdit && photos.length > 0 && (
         <Button asChild kind="main">
