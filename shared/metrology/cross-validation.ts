@@ -1,6 +1,7 @@
 import { choleskyInPlace, solveLower, solveLowerRows, solveLowerTransposed } from './cholesky'
 import { meanRows, meanValues, runsOfClicks } from './click-runs'
-import type { SurfaceFit, TracedPoints } from './surface-fit'
+import type { SurfaceFit } from './surface-fit'
+import type { TracedPoints } from './traced-points'
 
 export interface CrossValidation {
   /** For each order left out: rms of what the other bands foretell wrongly beyond the clicks' own noise, bands. */

@@ -1,7 +1,8 @@
 import { designMatrix } from './design-matrix'
 import { solveLeastSquares } from './least-squares'
 import type { SurfaceBasis } from './surface-basis'
-import { pickClicks, type SurfaceFit, type TracedPoints, thinned } from './surface-fit'
+import type { SurfaceFit } from './surface-fit'
+import { pickClicks, type TracedPoints, thinned } from './traced-points'
 
 /** A band that lies farther than this from a simple surface through the others may carry a wrong number. */
 const SUSPECT_BANDS = 0.4

@@ -1,6 +1,7 @@
 import type { PartFrame } from '../geometry/part-frame'
 import { isMeasured, type MeasuredArea } from './measured-area'
-import type { SurfaceFit, TracedPoints } from './surface-fit'
+import type { SurfaceFit } from './surface-fit'
+import type { TracedPoints } from './traced-points'
 import type { TracedReading } from './types'
 
 export type ArrowReading =

@@ -18,8 +18,9 @@ import { flatnessParameters } from './parameters'
 import { readPressArrow } from './press-arrow'
 import { rimDistancesMm, steepestRimSlope } from './rim'
 import { supportedPlaces } from './support'
-import { fitSurface, gapsAt, type SurfaceFit, type TracedPoints } from './surface-fit'
+import { fitSurface, gapsAt, type SurfaceFit } from './surface-fit'
 import { clicksOutside, clicksThatDoNotFit, crossedBands, finding, missingForAFigure } from './trace-checks'
+import type { TracedPoints } from './traced-points'
 import type {
   FacePlace,
   Finding,

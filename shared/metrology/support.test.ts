@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import type { MapGrid } from './measured-area'
 import { supportedPlaces } from './support'
-import type { TracedPoints } from './surface-fit'
+import type { TracedPoints } from './traced-points'
 
 const columns = 61
 const rows = 41

@@ -1,5 +1,5 @@
 import type { MapGrid } from './measured-area'
-import type { TracedPoints } from './surface-fit'
+import type { TracedPoints } from './traced-points'
 
 /**
  * Which places of the map the traces support: those no farther than one band spacing from a click, the spacing

@@ -1,7 +1,8 @@
 import type { PartFrame } from '../geometry/part-frame'
 import type { Trace } from '../schemas/marks'
 import { isMeasured, type MeasuredArea } from './measured-area'
-import type { SurfaceFit, TracedPoints } from './surface-fit'
+import type { SurfaceFit } from './surface-fit'
+import type { TracedPoints } from './traced-points'
 import type { Finding, FindingCode, FindingSeverity, TracedReading } from './types'
 
 type Place = readonly [number, number]

@@ -5,11 +5,11 @@ import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { toast } from 'sonner'
 import { Button } from '@/components/button'
-import { TextAreaField } from '@/components/fields/text-field'
 import { classNames } from '@/lib/class-names'
 import { formatMoment } from '@/lib/format-when'
 import { addRemark, answerRemark, closeRemark } from '@/lib/queries/reviews'
 import { useMay, useSession } from '@/lib/session'
+import { RemarkForm } from './remark-form'
 import type { Place } from './review-photo'
 
 interface Props {
@@ -77,35 +77,19 @@ function NewRemark({
   onDone: () => void
 }) {
   const { t } = useTranslation('review')
-  const [text, setText] = useState('')
   const add = useMutation({
-    mutationFn: () => addRemark(readingId, { text, place }),
+    mutationFn: (text: string) => addRemark(readingId, { text, place }),
     onSuccess: onDone,
     onError: (error) => toast.error(error.message),
   })
   return (
-    <form
-      className="py-2"
-      onSubmit={(event) => {
-        event.preventDefault()
-        add.mutate()
-      }}
-    >
-      <TextAreaField
-        label={`${t(place ? 'remarks.newAtPlace' : 'remarks.new')}: ${t('remarks.text').toLowerCase()}`}
-        rows={2}
-        maxLength={1000}
-        autoFocus
-        value={text}
-        onChange={(event) => setText(event.target.value)}
-      />
-      <div className="mt-2 flex gap-2.5">
-        <Button type="submit" disabled={add.isPending || text.trim() === ''}>
-          {t('remarks.add')}
-        </Button>
-        <Button onClick={onDone}>{t('common:cancel')}</Button>
-      </div>
-    </form>
+    <RemarkForm
+      label={`${t(place ? 'remarks.newAtPlace' : 'remarks.new')}: ${t('remarks.text').toLowerCase()}`}
+      submitLabel={t('remarks.add')}
+      isBusy={add.isPending}
+      onSubmit={add.mutate}
+      onCancel={onDone}
+    />
   )
 }
 
@@ -170,43 +154,28 @@ function RemarkActions({ number, remark, reading, review }: Omit<EntryProps, 'is
   const session = useSession()
   const reviews = useMay('reading:review')
   const isTaker = session.data?.id === reading.takenBy.id
-  const [text, setText] = useState<string | null>(null)
+  const [isAnswering, setAnswering] = useState(false)
   const run = useMutation({
     mutationFn: (job: () => Promise<void>) => job(),
-    onSuccess: () => setText(null),
+    onSuccess: () => setAnswering(false),
     onError: (error) => toast.error(error.message),
   })
   const mayClose = reviews && review.refusal !== 'ownReading'
   if (!isTaker && !reviews) return null
-  if (text !== null) {
+  if (isAnswering) {
     return (
-      <form
-        className="mt-2"
-        onSubmit={(event) => {
-          event.preventDefault()
-          run.mutate(() => answerRemark(reading.id, remark.id, text))
-        }}
-      >
-        <TextAreaField
-          label={t('remarks.answerText', { number })}
-          rows={2}
-          maxLength={1000}
-          autoFocus
-          value={text}
-          onChange={(event) => setText(event.target.value)}
-        />
-        <div className="mt-2 flex gap-2.5">
-          <Button type="submit" disabled={run.isPending || text.trim() === ''}>
-            {t('remarks.answer')}
-          </Button>
-          <Button onClick={() => setText(null)}>{t('common:cancel')}</Button>
-        </div>
-      </form>
+      <RemarkForm
+        label={t('remarks.answerText', { number })}
+        submitLabel={t('remarks.answer')}
+        isBusy={run.isPending}
+        onSubmit={(text) => run.mutate(() => answerRemark(reading.id, remark.id, text))}
+        onCancel={() => setAnswering(false)}
+      />
     )
   }
   return (
     <div className="flex gap-5">
-      <Button kind="quiet" onClick={() => setText('')}>
+      <Button kind="quiet" onClick={() => setAnswering(true)}>
         {t('remarks.answer')}
       </Button>
       {mayClose && (
